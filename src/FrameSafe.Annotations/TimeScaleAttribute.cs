@@ -14,8 +14,14 @@ public sealed class TimeScaleAttribute : Attribute
     /// <summary>The date is told on <paramref name="scale"/>, a type that implements <see cref="ITimeScale"/>.</summary>
     public TimeScaleAttribute(Type scale) => Scale = scale;
 
-    /// <summary>The time scale.</summary>
-    public Type Scale { get; }
+    /// <summary>The date is told on the scale that the type parameter of this name stands for: <c>nameof(TScale)</c>.</summary>
+    public TimeScaleAttribute(string typeParameter) => TypeParameter = typeParameter;
+
+    /// <summary>The time scale, where it is given as a type.</summary>
+    public Type? Scale { get; }
+
+    /// <summary>The type parameter that stands for the time scale, where it is given by name.</summary>
+    public string? TypeParameter { get; }
 
     /// <summary>What it counts from: <c>JD</c>, <c>MJD</c>, <c>J2000</c>, <c>Unix</c>, <c>GPS</c>, or an ISO 8601 date.</summary>
     public string? Origin { get; set; }
