@@ -81,7 +81,7 @@ internal static class UnitTable
                 // More than every second letter wrong is no likeness.
                 if (!otherCase && 2 * distance > Math.Max(symbol.Length, candidate.Length))
                     continue;
-                int score = otherCase ? 0 : (4 * distance) + prefixed;
+                int score = (otherCase ? 0 : 4 * distance) + prefixed;
                 if (score < bestScore || (score == bestScore && string.CompareOrdinal(candidate, best) < 0))
                     (best, bestScore) = (candidate, score);
             }

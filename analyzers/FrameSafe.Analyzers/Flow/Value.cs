@@ -1,0 +1,73 @@
+using System.Collections.Immutable;
+using FrameSafe.Analyzers.Reading;
+using FrameSafe.Analyzers.Tags;
+
+namespace FrameSafe.Analyzers.Flow;
+
+/// <summary>
+/// What is known of a value where it stands: the tag of a number or, of a collection or vector, of each element; the
+/// declaration that it came from; and of a tuple, its elements.
+/// </summary>
+internal sealed class Value
+{
+    private Value(Tag tag, Origin? origin, ImmutableArray<Value> parts)
+    {
+        Tag = tag;
+        Origin = origin;
+        Parts = parts;
+    }
+
+    internal static Value Unknown { get; } = new(Tag.Unknown, null, []);
+
+    /// <summary>A plain number that is no literal.</summary>
+    internal static Value Number { get; } = Of(Tag.Declared(Unit.One, kind: QuantityKind.Number));
+
+    internal static Value Angle { get; } = Of(Tag.Declared(Unit.One, kind: QuantityKind.Angle));
+
+    internal Tag Tag { get; }
+
+    internal Origin? Origin { get; }
+
+    internal ImmutableArray<Value> Parts { get; }
+
+    internal static Value Of(Tag tag, Origin? origin = null) => new(tag, origin, []);
+
+    internal static Value Of(Declaration? declaration)
+        => declaration is null ? Unknown : new(declaration.Tag, declaration.Origin, []);
+
+    internal static Value Tuple(ImmutableArray<Value> parts) => new(Tag.Unknown, null, parts);
+
+    internal Value With(Tag tag) => tag.Equals(Tag) && tag.UnitText == Tag.UnitText ? this : new(tag, Origin, []);
+
+    /// <summary>What two paths agree on.</summary>
+    internal static Value Merge(Value left, Value right)
+    {
+        if (ReferenceEquals(left, right))
+            return left;
+        if (left.Parts.Length > 0 && left.Parts.Length == right.Parts.Length)
+        {
+            ImmutableArray<Value>.Builder parts = ImmutableArray.CreateBuilder<Value>(left.Parts.Length);
+            for (int i = 0; i < left.Parts.Length; i++)
+                parts.Add(Merge(left.Parts[i], right.Parts[i]));
+            return Tuple(parts.MoveToImmutable());
+        }
+
+        return new(TagAlgebra.Merge(left.Tag, right.Tag), left.Tag.IsNeutral ? right.Origin : left.Origin ?? right.Origin, []);
+    }
+
+    /// <summary>Whether both know the same; where they know it from is no matter.</summary>
+    internal bool Agrees(Value other)
+    {
+        if (ReferenceEquals(this, other))
+            return true;
+        if (!Tag.Equals(other.Tag) || Parts.Length != other.Parts.Length)
+            return false;
+        for (int i = 0; i < Parts.Length; i++)
+        {
+            if (!Parts[i].Agrees(other.Parts[i]))
+                return false;
+        }
+
+        return true;
+    }
+}

@@ -1,0 +1,93 @@
+using System;
+using System.Collections.Generic;
+using System.Collections.Immutable;
+using System.Threading;
+using FrameSafe.Analyzers.Flow;
+using FrameSafe.Analyzers.Reading;
+using FrameSafe.Analyzers.Rules;
+using Microsoft.CodeAnalysis;
+using Microsoft.CodeAnalysis.CSharp;
+using Microsoft.CodeAnalysis.CSharp.Syntax;
+using Microsoft.CodeAnalysis.Diagnostics;
+using Microsoft.CodeAnalysis.Operations;
+
+namespace FrameSafe.Analyzers;
+
+/// <summary>
+/// Finds mixed frames, clocks and units and Newtonian arithmetic. One walk of a body serves all rules; a compilation that does
+/// not reference the annotations costs nothing.
+/// </summary>
+[DiagnosticAnalyzer(LanguageNames.CSharp)]
+public sealed class FrameSafeAnalyzer : DiagnosticAnalyzer
+{
+    /// <inheritdoc/>
+    public override ImmutableArray<DiagnosticDescriptor> SupportedDiagnostics => RuleTable.Descriptors;
+
+    /// <inheritdoc/>
+    public override void Initialize(AnalysisContext context)
+    {
+        context.ConfigureGeneratedCodeAnalysis(GeneratedCodeAnalysisFlags.None);
+        context.EnableConcurrentExecution();
+        context.RegisterCompilationStartAction(Start);
+    }
+
+    private static void Start(CompilationStartAnalysisContext context)
+    {
+        if (context.Compilation.GetTypeByMetadataName(Vocabulary.UnitAttribute) is null)
+            return;
+        var knowledge = new Knowledge(context.Compilation);
+        context.RegisterOperationBlockAction(block => JudgeBodies(block, knowledge));
+        context.RegisterSyntaxNodeAction(JudgeAttribute, SyntaxKind.Attribute);
+        context.RegisterCompilationEndAction(JudgeSettings);
+    }
+
+    private static void JudgeBodies(OperationBlockAnalysisContext context, Knowledge knowledge)
+    {
+        List<Encounter>? encounters = null;
+        foreach (IOperation body in context.OperationBlocks)
+        {
+            if (body is IAttributeOperation || !Relevance.Concerns(body, context.OwningSymbol, knowledge.Tags))
+                continue;
+            var walk = new Walk(knowledge, context.OwningSymbol, context.CancellationToken);
+            try
+            {
+                walk.Run(body);
+            }
+            catch (InsufficientExecutionStackException)
+            {
+                // Code nested too deeply to follow: nothing is known of it.
+                continue;
+            }
+
+            if (walk.Encounters.Count > 0)
+                (encounters ??= []).AddRange(walk.Encounters);
+        }
+
+        if (encounters is null)
+            return;
+        AnalyzerConfigOptions options = context.Options.AnalyzerConfigOptionsProvider.GetOptions(encounters[0].Place.SyntaxTree);
+        var bench = new Bench(knowledge.Frames, Settings.Budget(options, out _));
+        foreach (Finding finding in RuleTable.Judge(encounters, bench))
+            context.ReportDiagnostic(finding.ToDiagnostic());
+    }
+
+    private static void JudgeAttribute(SyntaxNodeAnalysisContext context)
+    {
+        var attribute = (AttributeSyntax)context.Node;
+        if (!DeclarationAttributes.IsNamedLikeOurs(attribute))
+            return;
+        foreach (Finding finding in DeclarationAttributes.Judge(attribute, context.SemanticModel, context.CancellationToken))
+            context.ReportDiagnostic(finding.ToDiagnostic());
+    }
+
+    private static void JudgeSettings(CompilationAnalysisContext context)
+    {
+        var reported = new HashSet<string>();
+        foreach (SyntaxTree tree in context.Compilation.SyntaxTrees)
+        {
+            Settings.Budget(context.Options.AnalyzerConfigOptionsProvider.GetOptions(tree), out string? unreadable);
+            if (unreadable is not null && reported.Add(unreadable))
+                context.ReportDiagnostic(RuleTable.ImpossibleFrame.JudgeBudget(unreadable).ToDiagnostic());
+        }
+    }
+}

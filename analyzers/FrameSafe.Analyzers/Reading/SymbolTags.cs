@@ -1,0 +1,183 @@
+using System.Collections.Concurrent;
+using System.Collections.Immutable;
+using FrameSafe.Analyzers.Tags;
+using Microsoft.CodeAnalysis;
+
+namespace FrameSafe.Analyzers.Reading;
+
+/// <summary>
+/// The declared tags of the symbols of one compilation: their own attributes, else those of what they override or implement.
+/// </summary>
+internal sealed class SymbolTags
+{
+    private static readonly Declaration Nothing = new(Tag.Unknown, new("", "", null));
+
+    private readonly ConcurrentDictionary<ISymbol, Declaration> _declarations = new(SymbolEqualityComparer.Default);
+    private readonly ConcurrentDictionary<IMethodSymbol, Declaration> _returns = new(SymbolEqualityComparer.Default);
+    private readonly ConcurrentDictionary<IAssemblySymbol, bool> _tagged = new(SymbolEqualityComparer.Default);
+    private readonly IAssemblySymbol _assembly;
+
+    internal SymbolTags(Compilation compilation) => _assembly = compilation.Assembly;
+
+    /// <summary>Whether anything that is declared in an assembly can carry a tag.</summary>
+    internal bool MayCarryTags(IAssemblySymbol? assembly)
+        => assembly is not null && (SymbolEqualityComparer.Default.Equals(assembly, _assembly) || _tagged.GetOrAdd(assembly, ReferencesAnnotations));
+
+    /// <summary>The declared tag of a parameter, field or property; null where nothing is declared.</summary>
+    internal Declaration? Of(ISymbol symbol)
+    {
+        if (symbol is not (IParameterSymbol or IFieldSymbol or IPropertySymbol) || !MayCarryTags(symbol.ContainingAssembly))
+            return null;
+        Declaration found = _declarations.GetOrAdd(symbol, Read);
+        return ReferenceEquals(found, Nothing) ? null : found;
+    }
+
+    /// <summary>The declared tag of what a method returns (of the element of a task or collection); null where nothing is declared.</summary>
+    internal Declaration? OfReturn(IMethodSymbol method)
+    {
+        if (method.ReturnsVoid || !MayCarryTags(method.ContainingAssembly))
+            return null;
+        Declaration found = _returns.GetOrAdd(method, ReadReturn);
+        return ReferenceEquals(found, Nothing) ? null : found;
+    }
+
+    /// <summary>Whether a member is itself a crossing.</summary>
+    internal bool IsBoundary(ISymbol? member)
+    {
+        for (; member is IMethodSymbol or IPropertySymbol; member = member.ContainingSymbol)
+        {
+            if (HasAttribute(member, "FrameBoundaryAttribute")
+                || (member is IMethodSymbol { AssociatedSymbol: { } property } && HasAttribute(property, "FrameBoundaryAttribute")))
+            {
+                return true;
+            }
+        }
+
+        return false;
+    }
+
+    private static bool HasAttribute(ISymbol symbol, string name)
+    {
+        foreach (AttributeData attribute in symbol.GetAttributes())
+        {
+            if (attribute.AttributeClass is { } type && type.Name == name && Vocabulary.IsOurs(type))
+                return true;
+        }
+
+        return false;
+    }
+
+    private static bool ReferencesAnnotations(IAssemblySymbol assembly)
+    {
+        if (assembly.Name == Vocabulary.Assembly)
+            return true;
+        foreach (IModuleSymbol module in assembly.Modules)
+        {
+            foreach (AssemblyIdentity reference in module.ReferencedAssemblies)
+            {
+                if (reference.Name == Vocabulary.Assembly)
+                    return true;
+            }
+        }
+
+        return false;
+    }
+
+    private Declaration Read(ISymbol symbol)
+    {
+        if (TagAttributes.Read(symbol.GetAttributes(), symbol) is { } own)
+            return new(Known(own.ToTag(), symbol), Origin.Of(symbol));
+        ISymbol? elder = symbol switch
+        {
+            IParameterSymbol parameter => ElderParameter(parameter),
+            IPropertySymbol property => (ISymbol?)PositionalParameter(property) ?? ElderProperty(property),
+            _ => null,
+        };
+        return elder is not null && Of(elder) is { } inherited ? inherited : Nothing;
+    }
+
+    private Declaration ReadReturn(IMethodSymbol method)
+    {
+        if (method.AssociatedSymbol is IPropertySymbol property)
+            return method.MethodKind == MethodKind.PropertyGet ? Of(property) ?? Nothing : Nothing;
+        if (TagAttributes.Read(method.GetReturnTypeAttributes(), method) is { } own)
+            return new(own.ToTag(), Origin.Of(method));
+        return ElderMethod(method) is { } elder ? OfReturn(elder) ?? Nothing : Nothing;
+    }
+
+    // A constant that is the speed of light in its unit is the same in every frame.
+    private static Tag Known(Tag tag, ISymbol symbol)
+        => symbol is IFieldSymbol { HasConstantValue: true, ConstantValue: double value } && tag.Frame is null && value == LightSpeed.ValueIn(tag)
+            ? tag with { IsConstant = true, Kind = QuantityKind.SignalSpeed }
+            : tag;
+
+    private IParameterSymbol? ElderParameter(IParameterSymbol parameter)
+    {
+        switch (parameter.ContainingSymbol)
+        {
+            case IMethodSymbol { AssociatedSymbol: IPropertySymbol property } accessor:
+                // The value of a setter is tagged as the property; an indexer's other parameters are the property's own.
+                return parameter.Ordinal < property.Parameters.Length
+                    ? property.Parameters[parameter.Ordinal]
+                    : ElderMethod(accessor)?.Parameters[parameter.Ordinal];
+            case IMethodSymbol method:
+                return ElderMethod(method) is { } elder && elder.Parameters.Length > parameter.Ordinal
+                    ? elder.Parameters[parameter.Ordinal]
+                    : null;
+            case IPropertySymbol property:
+                return ElderProperty(property) is { } elderProperty && elderProperty.Parameters.Length > parameter.Ordinal
+                    ? elderProperty.Parameters[parameter.Ordinal]
+                    : null;
+            default:
+                return null;
+        }
+    }
+
+    private static IParameterSymbol? PositionalParameter(IPropertySymbol property)
+    {
+        if (!property.ContainingType.IsRecord)
+            return null;
+        foreach (IMethodSymbol constructor in property.ContainingType.InstanceConstructors)
+        {
+            foreach (IParameterSymbol parameter in constructor.Parameters)
+            {
+                if (parameter.Name == property.Name && SymbolEqualityComparer.Default.Equals(parameter.Type, property.Type))
+                    return parameter;
+            }
+        }
+
+        return null;
+    }
+
+    private IMethodSymbol? ElderMethod(IMethodSymbol method)
+        => method.OverriddenMethod
+            ?? method.PartialDefinitionPart
+            ?? (method.ExplicitInterfaceImplementations.Length > 0
+                ? method.ExplicitInterfaceImplementations[0]
+                : Implemented(method) as IMethodSymbol);
+
+    private IPropertySymbol? ElderProperty(IPropertySymbol property)
+        => property.OverriddenProperty
+            ?? (property.ExplicitInterfaceImplementations.Length > 0
+                ? property.ExplicitInterfaceImplementations[0]
+                : Implemented(property) as IPropertySymbol);
+
+    // The interface member that a public member implements, among interfaces that can carry tags.
+    private ISymbol? Implemented(ISymbol member)
+    {
+        if (member.DeclaredAccessibility != Accessibility.Public || member.IsStatic || member.ContainingType is not { TypeKind: not TypeKind.Interface } type)
+            return null;
+        foreach (INamedTypeSymbol @interface in type.AllInterfaces)
+        {
+            if (!MayCarryTags(@interface.ContainingAssembly))
+                continue;
+            foreach (ISymbol candidate in (ImmutableArray<ISymbol>)@interface.GetMembers(member.Name))
+            {
+                if (SymbolEqualityComparer.Default.Equals(type.FindImplementationForInterfaceMember(candidate), member))
+                    return candidate;
+            }
+        }
+
+        return null;
+    }
+}

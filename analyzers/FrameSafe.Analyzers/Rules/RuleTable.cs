@@ -1,0 +1,58 @@
+using System.Collections.Generic;
+using System.Collections.Immutable;
+using System.Linq;
+using FrameSafe.Analyzers.Flow;
+using Microsoft.CodeAnalysis;
+
+namespace FrameSafe.Analyzers.Rules;
+
+/// <summary>All rules.</summary>
+internal static class RuleTable
+{
+    internal static UnreadableUnit UnreadableUnit { get; } = new();
+
+    internal static ImpossibleFrame ImpossibleFrame { get; } = new();
+
+    internal static ImmutableArray<Rule> All { get; } =
+    [
+        new MixedFrames(),
+        new WrongFrame(),
+        new MixedTransforms(),
+        new Simultaneity(),
+        new ProperAndCoordinateTime(),
+        new LorentzDirection(),
+        new MixedClocks(),
+        new MixedTimeScales(),
+        new VelocityAddition(),
+        new SeparationRateAsVelocity(),
+        new ProperLength(),
+        new CelerityAsVelocity(),
+        new EnergyKinds(),
+        new MixedUnits(),
+        new WrongUnit(),
+        new MixedDimensions(),
+        new FunctionArgument(),
+        UnreadableUnit,
+        new NaturalUnits(),
+        ImpossibleFrame,
+    ];
+
+    internal static ImmutableArray<DiagnosticDescriptor> Descriptors { get; } = [.. All.Select(rule => rule.Descriptor)];
+
+    /// <summary>The findings of one body, one for each place, in the order of the code.</summary>
+    internal static IEnumerable<Finding> Judge(IEnumerable<Encounter> encounters, Bench bench)
+    {
+        var places = new HashSet<SyntaxNode>();
+        foreach (Encounter encounter in encounters)
+        {
+            foreach (Rule rule in All)
+            {
+                if (rule.Judge(encounter, bench) is not { } finding)
+                    continue;
+                if (places.Add(encounter.Place))
+                    yield return finding;
+                break;
+            }
+        }
+    }
+}
