@@ -53,4 +53,10 @@ internal static class FindingProperties
 
     /// <summary>Name of the right or stable form in the table of forms (<c>form</c>), or of the constant (<c>constant</c>).</summary>
     internal const string Form = "form";
+
+    /// <summary>The code of the velocity that a Newtonian form stands on (<c>form</c>).</summary>
+    internal const string Velocity = "velocity";
+
+    /// <summary>The code of the mass that a Newtonian form stands on (<c>form</c>).</summary>
+    internal const string Mass = "mass";
 }

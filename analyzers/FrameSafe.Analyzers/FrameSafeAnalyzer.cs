@@ -43,7 +43,7 @@ public sealed class FrameSafeAnalyzer : DiagnosticAnalyzer
 
     private static void JudgeBodies(OperationBlockAnalysisContext context, Knowledge knowledge)
     {
-        List<Encounter>? encounters = null;
+        List<Observation>? observations = null;
         foreach (IOperation body in context.OperationBlocks)
         {
             if (body is IAttributeOperation || !Relevance.Concerns(body, context.OwningSymbol, knowledge.Tags))
@@ -59,15 +59,15 @@ public sealed class FrameSafeAnalyzer : DiagnosticAnalyzer
                 continue;
             }
 
-            if (walk.Encounters.Count > 0)
-                (encounters ??= []).AddRange(walk.Encounters);
+            foreach (Observation observation in walk.Observations)
+                (observations ??= []).Add(observation);
         }
 
-        if (encounters is null)
+        if (observations is null)
             return;
-        AnalyzerConfigOptions options = context.Options.AnalyzerConfigOptionsProvider.GetOptions(encounters[0].Place.SyntaxTree);
+        AnalyzerConfigOptions options = context.Options.AnalyzerConfigOptionsProvider.GetOptions(observations[0].Place.SyntaxTree);
         var bench = new Bench(knowledge.Frames, Settings.Budget(options, out _));
-        foreach (Finding finding in RuleTable.Judge(encounters, bench))
+        foreach (Finding finding in RuleTable.Judge(observations, bench))
             context.ReportDiagnostic(finding.ToDiagnostic());
     }
 

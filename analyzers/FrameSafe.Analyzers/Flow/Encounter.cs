@@ -1,7 +1,12 @@
+using System.Collections.Immutable;
 using FrameSafe.Analyzers.Tags;
 using Microsoft.CodeAnalysis;
 
 namespace FrameSafe.Analyzers.Flow;
+
+/// <summary>Something about a body that a rule may have to speak of.</summary>
+/// <param name="Place">The expression that is reported.</param>
+internal abstract record Observation(SyntaxNode Place);
 
 /// <summary>A place where two numbers met that do not go together.</summary>
 /// <param name="Place">The expression that is reported.</param>
@@ -10,6 +15,7 @@ namespace FrameSafe.Analyzers.Flow;
 /// <param name="Right">The right operand, or the target.</param>
 /// <param name="Verb">What is done with them, for a message: added, subtracted, compared, passed, …</param>
 internal sealed record Encounter(SyntaxNode Place, Clash Clash, Side Left, Side Right, string Verb)
+    : Observation(Place)
 {
     /// <summary>The tag that is wanted of the result, where it goes straight to a declared target.</summary>
     internal Tag? Wanted { get; init; }
@@ -21,3 +27,11 @@ internal sealed record Encounter(SyntaxNode Place, Clash Clash, Side Left, Side 
 /// <param name="Description">A declared target in words: "parameter `stretch` of `TimeOver`"; null for an expression.</param>
 /// <param name="Operation">The operand as the compiler understands it; null for a declared target.</param>
 internal sealed record Side(Value Value, SyntaxNode? Syntax, string? Description = null, IOperation? Operation = null);
+
+/// <summary>A Newtonian formula of a velocity.</summary>
+/// <param name="Place">The expression.</param>
+/// <param name="Quantity">What it stands for: a kinetic energy or a momentum.</param>
+/// <param name="Velocities">The velocity, or its components.</param>
+/// <param name="Mass">The mass.</param>
+internal sealed record NewtonianForm(
+    SyntaxNode Place, QuantityKind Quantity, ImmutableArray<Side> Velocities, Side Mass) : Observation(Place);

@@ -15,7 +15,7 @@ internal sealed partial class Walk
         Value instance = Visit(operation.Instance);
         IMethodSymbol method = operation.TargetMethod;
         if (KnownFunctions.Of(method) is { } function && Values(operation.Arguments) is { } numbers)
-            return Apply(function, operation, numbers);
+            return Recognise(operation, Apply(function, operation, numbers));
         if (SequenceMethods.IsSequence(method))
             return Sequence(operation, instance);
 

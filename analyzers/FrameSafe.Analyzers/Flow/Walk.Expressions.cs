@@ -18,7 +18,7 @@ internal sealed partial class Walk
 
     public override Value VisitParameterReference(IParameterReferenceOperation operation, object? argument)
         => Tags.Of(operation.Parameter) is { } declared
-            ? _environment[operation.Parameter] is { } narrowed && !_unstable.Contains(operation.Parameter) ? narrowed : Value.Of(declared)
+            ? _environment[operation.Parameter] is { } narrowed && !IsUnstable(operation.Parameter) ? narrowed : Value.Of(declared)
             : Variable(operation.Parameter);
 
     public override Value VisitLocalReference(ILocalReferenceOperation operation, object? argument)
@@ -107,6 +107,7 @@ internal sealed partial class Walk
                 : step.ConstantValue.HasValue && Constant(step.ConstantValue.Value) is { Tag.IsUnknown: false } folded && IsBare(left) && IsBare(right)
                     ? folded
                     : Binary(step.Syntax, step.OperatorKind, left, step.LeftOperand, right, step.RightOperand, step.Type);
+            left = Recognise(step, left);
         }
 
         return left;
@@ -259,7 +260,7 @@ internal sealed partial class Walk
     private static bool IsBare(Value value) => value.Origin is null && (value.Tag.IsConstant || value.Tag.IsUnknown);
 
     private Value Variable(ISymbol variable)
-        => _unstable.Contains(variable) ? Value.Unknown : _environment[variable] ?? Value.Unknown;
+        => IsUnstable(variable) ? Value.Unknown : _environment[variable] ?? Value.Unknown;
 
     private Value TupleElement(IFieldReferenceOperation operation)
     {
@@ -280,9 +281,9 @@ internal sealed partial class Walk
     /// <summary>The value of something that is walked elsewhere: what it disagrees about is noted there.</summary>
     private Value Quietly(IOperation operation)
     {
-        int noted = _encounters.Count;
+        (int, int) noted = Noted;
         Value value = Visit(operation);
-        _encounters.RemoveRange(noted, _encounters.Count - noted);
+        Forget(noted);
         return value;
     }
 

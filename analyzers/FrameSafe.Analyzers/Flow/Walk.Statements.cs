@@ -192,7 +192,7 @@ internal sealed partial class Walk
         (ILabelSymbol? exit, ILabelSymbol? next) = loop is ILoopOperation labels ? (labels.ExitLabel, labels.ContinueLabel) : (null, null);
         for (int pass = 0; ; pass++)
         {
-            int noted = _encounters.Count;
+            (int, int) noted = Noted;
             bool reachable = _environment.IsReachable;
             int mark = _environment.Mark;
             var jumps = new Jumps(exit, next, mark);
@@ -226,7 +226,7 @@ internal sealed partial class Walk
                 return;
             }
 
-            _encounters.RemoveRange(noted, _encounters.Count - noted);
+            Forget(noted);
         }
     }
 

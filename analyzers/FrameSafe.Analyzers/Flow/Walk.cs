@@ -1,4 +1,5 @@
 using System.Collections.Generic;
+using System.Linq;
 using System.Runtime.CompilerServices;
 using System.Threading;
 using FrameSafe.Analyzers.Reading;
@@ -18,10 +19,11 @@ internal sealed partial class Walk : OperationVisitor<object?, Value>
     private readonly CancellationToken _cancellation;
     private readonly Environment _environment = new();
     private readonly List<Encounter> _encounters = [];
-    private readonly HashSet<ISymbol> _unstable = new(SymbolEqualityComparer.Default);
+    private readonly List<NewtonianForm> _newtonian = [];
     private readonly Stack<Jumps> _jumps = new();
     private readonly int _depth;
     private Returns _returns;
+    private Assignments? _assignments;
 
     internal Walk(Knowledge knowledge, ISymbol member, CancellationToken cancellation, int depth = 0)
     {
@@ -31,7 +33,9 @@ internal sealed partial class Walk : OperationVisitor<object?, Value>
         _returns = Returns.Of(member, knowledge.Tags);
     }
 
-    internal IReadOnlyList<Encounter> Encounters => _encounters;
+    /// <summary>What the walk noted, in the order of the code.</summary>
+    internal IEnumerable<Observation> Observations => ((IEnumerable<Observation>)_encounters).Concat(_newtonian)
+        .OrderBy(static observation => observation.Place.SpanStart);
 
     /// <summary>What the body returns, over all its returns.</summary>
     internal Value Result => _returns.Result ?? Value.Unknown;
@@ -39,7 +43,7 @@ internal sealed partial class Walk : OperationVisitor<object?, Value>
     /// <summary>Walks a body; an expression that is a body by itself (an initialiser) is a value that goes to its member.</summary>
     internal void Run(IOperation body)
     {
-        Unstable.Find(body, _unstable);
+        _assignments = new(body);
         Visit(body);
     }
 
@@ -62,7 +66,18 @@ internal sealed partial class Walk : OperationVisitor<object?, Value>
         return Value.Unknown;
     }
 
+    private bool IsUnstable(ISymbol variable) => _assignments?.IsUnstable(variable) == true;
+
     private SymbolTags Tags => _knowledge.Tags;
+
+    private (int Encounters, int Newtonian) Noted => (_encounters.Count, _newtonian.Count);
+
+    // What was noted since will be noted again, or is noted elsewhere.
+    private void Forget((int Encounters, int Newtonian) noted)
+    {
+        _encounters.RemoveRange(noted.Encounters, _encounters.Count - noted.Encounters);
+        _newtonian.RemoveRange(noted.Newtonian, _newtonian.Count - noted.Newtonian);
+    }
 
     private void Note(SyntaxNode place, Clash? clash, Side left, Side right, string verb)
     {

@@ -52,6 +52,10 @@ internal sealed class FrameTable
         return null;
     }
 
+    /// <summary>Whether the motion of one frame is declared in another.</summary>
+    internal bool IsDeclaredIn(string frame, string other)
+        => _motions.Value.TryGetValue(frame, out List<Motion>? motions) && motions.Exists(motion => motion.Other == other && !motion.IsReverse);
+
     /// <summary>The largest speed declared on a frame or on one that is declared relative to it; null where none is.</summary>
     internal double? MaxSpeedIn(string frame)
     {
@@ -100,8 +104,8 @@ internal sealed class FrameTable
 
         void Add(string one, string other, double maxSpeed)
         {
-            AddStep(one, new(other, maxSpeed));
-            AddStep(other, new(one, maxSpeed));
+            AddStep(one, new(other, maxSpeed, isReverse: false));
+            AddStep(other, new(one, maxSpeed, isReverse: true));
         }
 
         void AddStep(string from, Motion motion)
@@ -112,8 +116,10 @@ internal sealed class FrameTable
         }
     }
 
-    private readonly struct Motion(string other, double maxSpeed)
+    private readonly struct Motion(string other, double maxSpeed, bool isReverse)
     {
+        internal bool IsReverse { get; } = isReverse;
+
         internal string Other { get; } = other;
 
         internal double MaxSpeed { get; } = maxSpeed;

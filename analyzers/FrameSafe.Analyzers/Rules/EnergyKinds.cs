@@ -19,7 +19,7 @@ internal sealed class EnergyKinds : MeetingRule
 
     internal override DiagnosticDescriptor Descriptor => Definition;
 
-    internal override Finding? Judge(Encounter encounter, Bench bench)
+    protected override Finding? Judge(Encounter encounter, Bench bench)
     {
         if (encounter.Clash.Kind != ClashKind.EnergyKind)
             return null;

@@ -19,7 +19,7 @@ internal sealed class FunctionArgument : MeetingRule
 
     internal override DiagnosticDescriptor Descriptor => Definition;
 
-    internal override Finding? Judge(Encounter encounter, Bench bench)
+    protected override Finding? Judge(Encounter encounter, Bench bench)
     {
         if (encounter.Verb != "function")
             return null;

@@ -7,6 +7,11 @@ namespace FrameSafe.Analyzers.Rules;
 /// <summary>A rule about two numbers that met and do not go together.</summary>
 internal abstract class MeetingRule : Rule
 {
+    internal sealed override Finding? Judge(Observation observation, Bench bench)
+        => observation is Encounter encounter ? Judge(encounter, bench) : null;
+
+    protected abstract Finding? Judge(Encounter encounter, Bench bench);
+
     /// <summary>A finding with both sides' origins, the parts of the message as the descriptor orders them.</summary>
     protected Finding Report(Encounter encounter, string left, string right, params object[] arguments)
     {

@@ -19,7 +19,7 @@ internal sealed class MixedDimensions : MeetingRule
 
     internal override DiagnosticDescriptor Descriptor => Definition;
 
-    internal override Finding? Judge(Encounter encounter, Bench bench)
+    protected override Finding? Judge(Encounter encounter, Bench bench)
     {
         if (encounter.Clash.Kind is not (ClashKind.Dimension or ClashKind.Quantity) || encounter.Verb == "function")
             return null;

@@ -19,7 +19,7 @@ internal sealed class MixedTransforms : MeetingRule
 
     internal override DiagnosticDescriptor Descriptor => Definition;
 
-    internal override Finding? Judge(Encounter encounter, Bench bench)
+    protected override Finding? Judge(Encounter encounter, Bench bench)
         => encounter.Clash.Kind != ClashKind.Passage
             ? null
             : Report(

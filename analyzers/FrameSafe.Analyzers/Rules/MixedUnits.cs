@@ -19,7 +19,7 @@ internal sealed class MixedUnits : MeetingRule
 
     internal override DiagnosticDescriptor Descriptor => Definition;
 
-    internal override Finding? Judge(Encounter encounter, Bench bench)
+    protected override Finding? Judge(Encounter encounter, Bench bench)
     {
         if (encounter.Clash is not { Kind: ClashKind.Unit, Meeting: not Meeting.Target })
             return null;

@@ -20,7 +20,7 @@ internal sealed class ProperAndCoordinateTime : MeetingRule
 
     internal override DiagnosticDescriptor Descriptor => Definition;
 
-    internal override Finding? Judge(Encounter encounter, Bench bench)
+    protected override Finding? Judge(Encounter encounter, Bench bench)
     {
         if (encounter.Clash.Kind != ClashKind.ProperAndCoordinateTime)
             return null;

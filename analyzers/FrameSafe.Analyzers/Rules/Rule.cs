@@ -8,6 +8,6 @@ internal abstract class Rule
 {
     internal abstract DiagnosticDescriptor Descriptor { get; }
 
-    /// <summary>The finding that an encounter is; null where this rule does not speak of it, or bears it.</summary>
-    internal virtual Finding? Judge(Encounter encounter, Bench bench) => null;
+    /// <summary>The finding that an observation is; null where this rule does not speak of it, or bears it.</summary>
+    internal virtual Finding? Judge(Observation observation, Bench bench) => null;
 }

@@ -24,6 +24,7 @@ internal static class RuleTable
         new MixedClocks(),
         new MixedTimeScales(),
         new VelocityAddition(),
+        new NewtonianMotion(),
         new SeparationRateAsVelocity(),
         new ProperLength(),
         new CelerityAsVelocity(),
@@ -40,16 +41,16 @@ internal static class RuleTable
     internal static ImmutableArray<DiagnosticDescriptor> Descriptors { get; } = [.. All.Select(rule => rule.Descriptor)];
 
     /// <summary>The findings of one body, one for each place, in the order of the code.</summary>
-    internal static IEnumerable<Finding> Judge(IEnumerable<Encounter> encounters, Bench bench)
+    internal static IEnumerable<Finding> Judge(IEnumerable<Observation> observations, Bench bench)
     {
         var places = new HashSet<SyntaxNode>();
-        foreach (Encounter encounter in encounters)
+        foreach (Observation observation in observations)
         {
             foreach (Rule rule in All)
             {
-                if (rule.Judge(encounter, bench) is not { } finding)
+                if (rule.Judge(observation, bench) is not { } finding)
                     continue;
-                if (places.Add(encounter.Place))
+                if (places.Add(observation.Place))
                     yield return finding;
                 break;
             }

@@ -19,7 +19,7 @@ internal sealed class SeparationRateAsVelocity : MeetingRule
 
     internal override DiagnosticDescriptor Descriptor => Definition;
 
-    internal override Finding? Judge(Encounter encounter, Bench bench)
+    protected override Finding? Judge(Encounter encounter, Bench bench)
         => encounter.Clash.Kind != ClashKind.SeparationRateAsVelocity
             ? null
             : Report(encounter, "is a separation rate", "is a velocity", Left(encounter), Right(encounter));

@@ -19,7 +19,7 @@ internal sealed class WrongFrame : MeetingRule
 
     internal override DiagnosticDescriptor Descriptor => Definition;
 
-    internal override Finding? Judge(Encounter encounter, Bench bench)
+    protected override Finding? Judge(Encounter encounter, Bench bench)
     {
         (Tag left, Tag right) = (encounter.Left.Value.Tag, encounter.Right.Value.Tag);
         if (encounter.Clash.Kind == ClashKind.FramePair)

@@ -1,0 +1,67 @@
+using System;
+using System.Collections.Generic;
+
+namespace FrameSafe.Analyzers.Formulas;
+
+/// <summary>
+/// Known formulas, recognised by what they compute: two rational or algebraic expressions that agree at points chosen without
+/// regard to either are the same expression (J. T. Schwartz, J. ACM 27 (1980) 701; R. Zippel, EUROSAM (1979) 216).
+/// </summary>
+internal static class KnownForms
+{
+    // In the units of c and 1, signs and sizes mixed; away from the special values 0, 1/2, 1/√2.
+    private static readonly double[] Points = [0.3719, -0.6203, 0.1571, 0.8347, -0.2291, 0.5477, -0.7583, 0.4649, 0.0923, -0.4127];
+
+    private const int Trials = 6;
+
+    private const double Tolerance = 1e-9;
+
+    /// <summary>Whether a formula of two velocities is their composition, (u ± v)/(1 ± uv/c²), up to an overall sign.</summary>
+    internal static bool IsComposition(Formula formula, double lightSpeed)
+        => Agrees(formula, 2, lightSpeed, static values => (values[0] + values[1]) / (1 + (values[0] * values[1])), lightSpeed)
+            || Agrees(formula, 2, lightSpeed, static values => (values[0] - values[1]) / (1 - (values[0] * values[1])), lightSpeed)
+            || Agrees(formula, 2, lightSpeed, static values => (values[1] - values[0]) / (1 - (values[0] * values[1])), lightSpeed);
+
+    /// <summary>Whether a formula of one velocity, or of its components, is the Lorentz factor 1/√(1 − v²/c²).</summary>
+    internal static bool IsLorentzFactor(Formula formula, int components, double lightSpeed)
+        => Agrees(formula, components, lightSpeed, static values => 1 / Math.Sqrt(1 - SumOfSquares(values, -1)), 1);
+
+    /// <summary>Whether a formula is ½m·Σv² of a mass (by its index) and any number of velocity components.</summary>
+    internal static bool IsNewtonianEnergy(Formula formula, int variables, int mass)
+        => Agrees(formula, variables, 1, values => values[mass] * SumOfSquares(values, mass) / 2, 1);
+
+    /// <summary>Whether a formula is mv.</summary>
+    internal static bool IsNewtonianMomentum(Formula formula)
+        => Agrees(formula, 2, 1, static values => values[0] * values[1], 1);
+
+    private static double SumOfSquares(double[] values, int except)
+    {
+        double sum = 0;
+        for (int i = 0; i < values.Length; i++)
+            sum += i == except ? 0 : values[i] * values[i];
+        return sum;
+    }
+
+    // The formula takes numbers in a unit, the form in multiples of that unit's scale.
+    private static bool Agrees(Formula formula, int variables, double unit, Func<double[], double> form, double resultUnit)
+    {
+        for (int trial = 0; trial < Trials; trial++)
+        {
+            var values = new double[variables];
+            var scaled = new double[variables];
+            for (int i = 0; i < variables; i++)
+            {
+                // Components together stay below c.
+                values[i] = Points[((trial * variables) + (i * 3) + trial) % Points.Length] / Math.Sqrt(variables);
+                scaled[i] = values[i] * unit;
+            }
+
+            double expected = form(values) * resultUnit;
+            double computed = formula.At((IReadOnlyList<double>)scaled);
+            if (!(Math.Abs(computed - expected) <= Tolerance * Math.Abs(expected)))
+                return false;
+        }
+
+        return true;
+    }
+}
