@@ -48,7 +48,7 @@ public static class SystemTime
     /// <exception cref="OverflowException">The time is beyond the range of <see cref="TimeSpan"/>.</exception>
     public static WithLoss<TimeSpan> ToTimeSpan<TScale>(this ElapsedTime<TScale> elapsed) where TScale : struct, ITimeScale
     {
-        double whole = Math.Floor(elapsed.InSeconds);
+        double whole = Math.Truncate(elapsed.InSeconds);
         double part = elapsed.InSeconds - whole + elapsed.RestInSeconds;
         long ticks = (long)Math.Round(part * TimeSpan.TicksPerSecond);
         TimeSpan span = new(checked(checked((long)whole * TimeSpan.TicksPerSecond) + ticks));
