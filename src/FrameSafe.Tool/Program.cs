@@ -1,1 +1,3 @@
-return 0;
+using FrameSafe.Tool.Commands;
+
+return await ToolCommand.Create().Parse(args).InvokeAsync();

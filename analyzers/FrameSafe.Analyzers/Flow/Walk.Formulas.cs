@@ -73,10 +73,11 @@ internal sealed partial class Walk
                 return;
         }
 
-        if (mass < 0)
+        if (mass < 0 || ScaleOfLight(sides[mass == 0 ? 1 : 0].Value.Tag) is not { } light)
             return;
-        bool isEnergy = dimension == Dimension.Energy && KnownForms.IsNewtonianEnergy(read.Formula, read.Variables.Count, mass);
-        if (!isEnergy && !(read.Variables.Count == 2 && KnownForms.IsNewtonianMomentum(read.Formula)))
+        bool isEnergy = dimension == Dimension.Energy && KnownForms.IsNewtonianEnergy(read.Formula, read.Variables.Count, mass, light);
+        bool isMomentum = dimension == Dimension.Momentum && read.Variables.Count == 2 && KnownForms.IsNewtonianMomentum(read.Formula, mass, light);
+        if (!isEnergy && !isMomentum)
             return;
         Side massSide = sides[mass];
         sides.RemoveAt(mass);

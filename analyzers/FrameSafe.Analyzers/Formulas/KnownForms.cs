@@ -26,13 +26,17 @@ internal static class KnownForms
     internal static bool IsLorentzFactor(Formula formula, int components, double lightSpeed)
         => Agrees(formula, components, lightSpeed, static values => 1 / Math.Sqrt(1 - SumOfSquares(values, -1)), 1);
 
-    /// <summary>Whether a formula is ½m·Σv² of a mass (by its index) and any number of velocity components.</summary>
-    internal static bool IsNewtonianEnergy(Formula formula, int variables, int mass)
-        => Agrees(formula, variables, 1, values => values[mass] * SumOfSquares(values, mass) / 2, 1);
+    /// <summary>
+    /// Whether a formula is ½m·Σv² of a mass (by its index) and any number of velocity components, also where they are large
+    /// against c: a full form is not taken for its first term.
+    /// </summary>
+    internal static bool IsNewtonianEnergy(Formula formula, int variables, int mass, double lightSpeed)
+        => Agrees(
+            formula, variables, lightSpeed, values => values[mass] * SumOfSquares(values, mass) / 2, lightSpeed * lightSpeed, mass);
 
-    /// <summary>Whether a formula is mv.</summary>
-    internal static bool IsNewtonianMomentum(Formula formula)
-        => Agrees(formula, 2, 1, static values => values[0] * values[1], 1);
+    /// <summary>Whether a formula is mv of a mass (by its index) and a velocity.</summary>
+    internal static bool IsNewtonianMomentum(Formula formula, int mass, double lightSpeed)
+        => Agrees(formula, 2, lightSpeed, static values => values[0] * values[1], lightSpeed, mass);
 
     private static double SumOfSquares(double[] values, int except)
     {
@@ -42,8 +46,8 @@ internal static class KnownForms
         return sum;
     }
 
-    // The formula takes numbers in a unit, the form in multiples of that unit's scale.
-    private static bool Agrees(Formula formula, int variables, double unit, Func<double[], double> form, double resultUnit)
+    // The formula takes numbers in a unit, the form in multiples of that unit; one variable may be in a unit of its own.
+    private static bool Agrees(Formula formula, int variables, double unit, Func<double[], double> form, double resultUnit, int except = -1)
     {
         for (int trial = 0; trial < Trials; trial++)
         {
@@ -53,7 +57,7 @@ internal static class KnownForms
             {
                 // Components together stay below c.
                 values[i] = Points[((trial * variables) + (i * 3) + trial) % Points.Length] / Math.Sqrt(variables);
-                scaled[i] = values[i] * unit;
+                scaled[i] = i == except ? values[i] : values[i] * unit;
             }
 
             double expected = form(values) * resultUnit;
