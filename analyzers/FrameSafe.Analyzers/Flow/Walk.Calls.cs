@@ -1,5 +1,6 @@
 using System.Collections.Generic;
 using System.Collections.Immutable;
+using FrameSafe.Analyzers.Formulas;
 using FrameSafe.Analyzers.Reading;
 using FrameSafe.Analyzers.Tags;
 using Microsoft.CodeAnalysis;
@@ -21,7 +22,7 @@ internal sealed partial class Walk
 
         Value[] arguments = Arguments(operation.Arguments);
         if (Tags.OfReturn(method) is { } declared)
-            return Value.Of(declared);
+            return Value.Of(declared).With(Passed(declared.Tag, operation));
         if (method.Name is "GetEnumerator" or "AsSpan" or "AsMemory" or "Slice" or "Clone" or "ToArray" or "ConfigureAwait" or "GetValueOrDefault"
             or "AsReadOnly" or "GetAwaiter" or "GetResult")
         {
@@ -66,6 +67,12 @@ internal sealed partial class Walk
         Nested(operation.Symbol, () => Visit(operation.Body), Returns.Of(operation.Symbol, Tags));
         return Value.Unknown;
     }
+
+    // A tag on an instantaneous rest frame stands for a family of frames: which member a number was carried into, its transform tells.
+    private Tag Passed(Tag tag, IInvocationOperation call)
+        => tag.Frame is { Nature: FrameNature.Rest } && Tags.IsTransform(call.TargetMethod) && FormulaReader.Name(call.Instance) is { } transform
+            ? tag with { Passage = transform }
+            : tag;
 
     /// <summary>Walks a function inside this body, with what its parameters are given; gives what it returns.</summary>
     private Value Function(IAnonymousFunctionOperation function, ImmutableArray<Value> given, Declaration? delegateReturn)

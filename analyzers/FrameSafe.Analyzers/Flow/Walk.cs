@@ -22,6 +22,7 @@ internal sealed partial class Walk : OperationVisitor<object?, Value>
     private readonly List<NewtonianForm> _newtonian = [];
     private readonly Stack<Jumps> _jumps = new();
     private readonly int _depth;
+    private readonly bool _isBoundary;
     private Returns _returns;
     private Assignments? _assignments;
 
@@ -31,6 +32,7 @@ internal sealed partial class Walk : OperationVisitor<object?, Value>
         _cancellation = cancellation;
         _depth = depth;
         _returns = Returns.Of(member, knowledge.Tags);
+        _isBoundary = knowledge.Tags.IsBoundary(member);
     }
 
     /// <summary>What the walk noted, in the order of the code.</summary>
@@ -81,9 +83,13 @@ internal sealed partial class Walk : OperationVisitor<object?, Value>
 
     private void Note(SyntaxNode place, Clash? clash, Side left, Side right, string verb)
     {
-        if (clash is not null && _environment.IsReachable)
+        if (clash is not null && _environment.IsReachable && !(_isBoundary && IsCrossing(clash.Kind)))
             _encounters.Add(new(place, clash, left, right, verb));
     }
+
+    // What a member that is itself a crossing is there to do.
+    private static bool IsCrossing(ClashKind kind) => kind is ClashKind.Frame or ClashKind.VelocityFrames or ClashKind.Simultaneity
+        or ClashKind.ProperAndCoordinateTime or ClashKind.Clock or ClashKind.TimeScale or ClashKind.FramePair or ClashKind.Passage;
 
     /// <summary>What leaves a loop or switch early: the states at its breaks and continues.</summary>
     private sealed class Jumps(ILabelSymbol? exit, ILabelSymbol? next, int mark)

@@ -41,20 +41,24 @@ internal sealed class SymbolTags
         return ReferenceEquals(found, Nothing) ? null : found;
     }
 
-    /// <summary>Whether a member is itself a crossing.</summary>
+    /// <summary>Whether a member is itself a crossing, or carries numbers between frames, which is the same.</summary>
     internal bool IsBoundary(ISymbol? member)
     {
         for (; member is IMethodSymbol or IPropertySymbol; member = member.ContainingSymbol)
         {
-            if (HasAttribute(member, "FrameBoundaryAttribute")
-                || (member is IMethodSymbol { AssociatedSymbol: { } property } && HasAttribute(property, "FrameBoundaryAttribute")))
-            {
+            if (IsMarked(member) || (member is IMethodSymbol { AssociatedSymbol: { } property } && IsMarked(property)))
                 return true;
-            }
         }
 
         return false;
+
+        static bool IsMarked(ISymbol symbol) => HasAttribute(symbol, "FrameBoundaryAttribute") || HasAttribute(symbol, "CarriesAttribute");
     }
+
+    /// <summary>Whether a method, or the type that it applies, says that it carries numbers from one frame to another.</summary>
+    internal bool IsTransform(IMethodSymbol method)
+        => MayCarryTags(method.ContainingAssembly)
+            && (HasAttribute(method, "CarriesAttribute") || HasAttribute(method.ContainingType, "CarriesAttribute"));
 
     private static bool HasAttribute(ISymbol symbol, string name)
     {
