@@ -23,11 +23,14 @@ internal static class SpeedOfLight
         ITypeSymbol? home = model.GetEnclosingSymbol(place.SpanStart, cancellation)?.ContainingType;
         var found = new List<IFieldSymbol>();
         Collect(model.Compilation.Assembly.GlobalNamespace);
-        return found
+        IFieldSymbol? best = found
             .OrderBy(field => !SymbolEqualityComparer.Default.Equals(field.ContainingType, home))
             .ThenBy(field => field.ToDisplayString(), System.StringComparer.Ordinal)
-            .FirstOrDefault()?
-            .ToMinimalDisplayString(model, place.SpanStart, Format);
+            .FirstOrDefault();
+        // Its own type's members are called by their name alone.
+        return best is null ? null
+            : SymbolEqualityComparer.Default.Equals(best.ContainingType, home) ? best.Name
+            : best.ToMinimalDisplayString(model, place.SpanStart, Format);
 
         void Collect(INamespaceOrTypeSymbol container)
         {
@@ -47,7 +50,6 @@ internal static class SpeedOfLight
         }
     }
 
-    // The containing type is named unless the place is inside it, as the code around would have it.
     private static SymbolDisplayFormat Format { get; } = new(
         typeQualificationStyle: SymbolDisplayTypeQualificationStyle.NameAndContainingTypesAndNamespaces,
         memberOptions: SymbolDisplayMemberOptions.IncludeContainingType);

@@ -68,6 +68,9 @@ internal static class TagAlgebra
         clash ??= PassageClash(a, b, meeting);
 
         Tag result = Joined(a, b, meeting, scale, kindClash is not null);
+        // A difference across frames is no separation rate, and one mistake is one finding.
+        if (clash == ClashKind.VelocityFrames)
+            result = result with { Kind = QuantityKind.Unspecified };
         return new(result, clash is { } kind ? new Clash(kind, left, right, meeting) : null);
     }
 

@@ -55,6 +55,42 @@ public readonly struct Boost<TFrom, TTo> : IEquatable<Boost<TFrom, TTo>>
         return new(celerity);
     }
 
+    /// <summary>The same energy and momentum in the other frame; both go together.</summary>
+    public FourMomentum<TTo> Map(FourMomentum<TFrom> momentum)
+    {
+        ExtendedTriple w = ExtendedTriple.Of(_ratio);
+        Extended lorentz = Extended.Sqrt(w.Square + 1);
+        Extended along = w.Dot(momentum.MomentumInJoules);
+        return new(
+            (lorentz * momentum.EnergyInJoules) - along,
+            momentum.MomentumInJoules + (w * ((along / (lorentz + 1)) - momentum.EnergyInJoules)));
+    }
+
+    /// <summary>The same field in the other frame; electric and magnetic go together.</summary>
+    public ElectromagneticField<TTo> Map(ElectromagneticField<TFrom> field)
+    {
+        double lorentz = Celerity.LorentzFactor(_ratio.Norm);
+        Triple electric = field.Electric;
+        Triple magnetic = field.Magnetic * PhysicsOfLight.Speed;
+        Triple carriedElectric = ((electric * lorentz) + _ratio.Cross(magnetic)).Plus(_ratio, -_ratio.Dot(electric) / (1 + lorentz));
+        Triple carriedMagnetic = ((magnetic * lorentz) - _ratio.Cross(electric)).Plus(_ratio, -_ratio.Dot(magnetic) / (1 + lorentz));
+        return new(carriedElectric, carriedMagnetic * (1 / PhysicsOfLight.Speed));
+    }
+
+    /// <summary>The same light in the other frame: Doppler effect and aberration.</summary>
+    public PlaneWave<TTo> Map(PlaneWave<TFrom> wave)
+    {
+        (double ratio, Triple direction) = Turn(1, wave.Direction.Components, -1);
+        return new(wave.FrequencyInHertz * ratio, new(direction * (1 / direction.Norm)));
+    }
+
+    /// <summary>The same direction of light in the other frame: aberration.</summary>
+    public Direction<TTo> Map(Direction<TFrom> direction)
+    {
+        (_, Triple carried) = Turn(1, direction.Components, -1);
+        return new(carried * (1 / carried.Norm));
+    }
+
     /// <summary>This boost followed by another: a boost and a rotation.</summary>
     public LorentzTransform<TFrom, TNext> Then<TNext>(Boost<TTo, TNext> next)
         where TNext : struct, IFrame

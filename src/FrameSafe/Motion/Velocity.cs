@@ -138,6 +138,11 @@ public readonly struct Velocity<TFrame> :
     public static Velocity<TFrame> FromLorentzFactorMinusOne([Unit("1")] double excess)
         => new(new(Celerity.FromLorentzFactorMinusOne(Require.Within(excess, 0, Celerity.Largest)), 0, 0));
 
+    /// <summary>A velocity along x from its rapidity.</summary>
+    /// <exception cref="ArgumentOutOfRangeException">Its size is above 346, where γ passes 1e150.</exception>
+    public static Velocity<TFrame> FromRapidity([Kind(QuantityKind.Rapidity)] double rapidity)
+        => new(new(Math.Sinh(Require.Within(rapidity, -346, 346)), 0, 0));
+
     /// <summary>Backwards.</summary>
     public static Velocity<TFrame> operator -(Velocity<TFrame> value) => new(-value._ratio);
 
