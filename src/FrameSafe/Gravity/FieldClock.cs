@@ -17,10 +17,18 @@ public readonly struct FieldClock<TClock> where TClock : struct, IClock
     private readonly Extended _squareMinusOne;
     private readonly Extended _square;
 
-    private FieldClock(Extended squareMinusOne, Extended square)
+    // Where the shift is that of a horizon's radius h at a place r, k·h/r, the three stand here too: two of one field then compare exactly.
+    private readonly Extended _horizon;
+    private readonly double _factor;
+    private readonly Extended _place;
+
+    private FieldClock(Extended squareMinusOne, Extended square, Extended horizon = default, double factor = 0, Extended place = default)
     {
         _squareMinusOne = squareMinusOne;
         _square = square;
+        _horizon = horizon;
+        _factor = factor;
+        _place = place;
     }
 
     private Extended Square => _square.High == 0 ? 1 : _square;
@@ -34,7 +42,7 @@ public readonly struct FieldClock<TClock> where TClock : struct, IClock
     public ClockRate<TClock, TOther> Against<TOther>(FieldClock<TOther> other) where TOther : struct, IClock
     {
         // With q = (a² − b²)/b²: a/b − 1 = q/(1 + √(1 + q)).
-        Extended excess = (_squareMinusOne - other._squareMinusOne) / other.Square;
+        Extended excess = Excess(other) / other.Square;
         Extended rate = Extended.Sqrt(Square / other.Square);
         Extended minusOne = excess / (rate + 1);
         return ClockRate<TClock, TOther>.From((double)rate, (double)minusOne);
@@ -43,4 +51,21 @@ public readonly struct FieldClock<TClock> where TClock : struct, IClock
     internal static FieldClock<TClock> FromSquareMinusOne(Extended squareMinusOne) => new(squareMinusOne, squareMinusOne + 1);
 
     internal static FieldClock<TClock> FromSquare(Extended squareMinusOne, Extended square) => new(squareMinusOne, square);
+
+    /// <summary>(dτ/dt)² = 1 − k·h/r: k is 1 at rest and 3/2 in a circular orbit.</summary>
+    internal static FieldClock<TClock> InField(Extended horizon, double factor, Extended place)
+    {
+        Extended reach = horizon * factor;
+        return new(-(reach / place), (place - reach) / place, horizon, factor, place);
+    }
+
+    // a² − b²; in one field h(k₂r₁ − k₁r₂)/(r₁r₂), which is exactly zero where an orbit's clock keeps step with the ground's.
+    private Extended Excess<TOther>(FieldClock<TOther> other)
+        where TOther : struct, IClock
+    {
+        bool sameField = _factor != 0 && other._factor != 0 && _horizon.High == other._horizon.High && _horizon.Low == other._horizon.Low;
+        return sameField
+            ? _horizon * ((_place * other._factor) - (other._place * _factor)) / (_place * other._place)
+            : _squareMinusOne - other._squareMinusOne;
+    }
 }

@@ -64,7 +64,7 @@ public readonly struct SchwarzschildField
     {
         Extended place = Place(radius, height);
         RequireOutside(place, 1, "the horizon", nameof(radius));
-        return FieldClock<TClock>.FromSquare(-(_horizon / place), (place - _horizon) / place);
+        return FieldClock<TClock>.InField(_horizon, 1, place);
     }
 
     /// <summary>A clock at rest, by its distance from the horizon in the radial coordinate: for places that no double radius tells apart.</summary>
@@ -86,8 +86,7 @@ public readonly struct SchwarzschildField
     {
         Extended place = Place(radius, 0);
         RequireOutside(place, 1.5, "the photon sphere", nameof(radius));
-        Extended reach = _horizon * 1.5;
-        return FieldClock<TClock>.FromSquare(-(reach / place), (place - reach) / place);
+        return FieldClock<TClock>.InField(_horizon, 1.5, place);
     }
 
     /// <summary>A clock that moves across the radius, such as one on turning ground: (dτ/dt)² = 1 − 2GM/rc² − v²/c².</summary>
@@ -145,6 +144,12 @@ public readonly struct SchwarzschildField
     [return: Kind(QuantityKind.GravitationalPotential)]
     public double NewtonianPotentialDifference([Unit("m")] double radius, [Unit("m")] double height) =>
         (GM * height / (Place(radius, height) * radius)).High;
+
+    /// <summary>The same by c²: the shift between the two places to first order, GMh/(r(r + h)c²); within 1 ulp.</summary>
+    /// <inheritdoc cref="NewtonianPotentialDifference"/>
+    [return: Unit("1")]
+    public double NewtonianShift([Unit("m")] double radius, [Unit("m")] double height) =>
+        (_horizon * 0.5 * height / (Place(radius, height) * radius)).High;
 
     private static Extended Tau => Extended.Sum(6.283185307179586, 2.4492935982947064e-16);
 

@@ -51,20 +51,11 @@ public readonly struct Boost<TFrom, TTo> : IEquatable<Boost<TFrom, TTo>>
         Triple moving = velocity.Ratio;
         if (Collinear(moving, _ratio))
             return new(new(Celerity.Composed(moving.X, -_ratio.X), 0, 0));
-        (_, Triple celerity) = Turn(velocity.LorentzFactor, moving, -1);
-        return new(celerity);
+        return new(BoostKernel.Compose(_ratio, moving, -1));
     }
 
     /// <summary>The same energy and momentum in the other frame; both go together.</summary>
-    public FourMomentum<TTo> Map(FourMomentum<TFrom> momentum)
-    {
-        ExtendedTriple w = ExtendedTriple.Of(_ratio);
-        Extended lorentz = Extended.Sqrt(w.Square + 1);
-        Extended along = w.Dot(momentum.MomentumInJoules);
-        return new(
-            (lorentz * momentum.EnergyInJoules) - along,
-            momentum.MomentumInJoules + (w * ((along / (lorentz + 1)) - momentum.EnergyInJoules)));
-    }
+    public FourMomentum<TTo> Map(FourMomentum<TFrom> momentum) => momentum.Carried<TTo>(_ratio);
 
     /// <summary>The same field in the other frame; electric and magnetic go together.</summary>
     public ElectromagneticField<TTo> Map(ElectromagneticField<TFrom> field)

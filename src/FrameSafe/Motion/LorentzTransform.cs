@@ -38,6 +38,16 @@ public readonly struct LorentzTransform<TFrom, TTo>
         }
     }
 
+    /// <summary>The rotation as a matrix that acts on columns, row by row.</summary>
+    [return: Unit("1")]
+    public double[] RotationMatrix()
+    {
+        Triple x = _rotation.Turn(new(1, 0, 0));
+        Triple y = _rotation.Turn(new(0, 1, 0));
+        Triple z = _rotation.Turn(new(0, 0, 1));
+        return [x.X, y.X, z.X, x.Y, y.Y, z.Y, x.Z, y.Z, z.Z];
+    }
+
     /// <summary>The way back.</summary>
     public LorentzTransform<TTo, TFrom> Inverse
     {
@@ -60,7 +70,7 @@ public readonly struct LorentzTransform<TFrom, TTo>
 
     /// <summary>The same motion in the other frame.</summary>
     public Velocity<TTo> Map(Velocity<TFrom> velocity)
-        => new(_rotation.Turn(BoostKernel.Apply(_ratio, velocity.LorentzFactor, velocity.Ratio, -1).Space));
+        => new(_rotation.Turn(BoostKernel.Compose(_ratio, velocity.Ratio, -1)));
 
     /// <summary>This transform followed by a boost.</summary>
     public LorentzTransform<TFrom, TNext> Then<TNext>(Boost<TTo, TNext> next)
@@ -77,7 +87,6 @@ public readonly struct LorentzTransform<TFrom, TTo>
     internal static LorentzTransform<TFrom, TTo> Of(Triple first, Triple second)
     {
         // The target's celerity in the first frame is the second's carried back out of the first boost.
-        (_, Triple resultant) = BoostKernel.Apply(first, Celerity.LorentzFactor(second.Norm), second, +1);
-        return new(resultant, Rotation.OfBoosts(second, first));
+        return new(BoostKernel.Compose(first, second, +1), Rotation.OfBoosts(second, first));
     }
 }

@@ -29,11 +29,11 @@ internal static class Celerity
     /// <summary>β = w/γ.</summary>
     internal static double SpeedRatio(double w) => w / LorentzFactor(w);
 
-    /// <summary>1 − |β| = 1/(γ(γ + |w|)).</summary>
+    /// <summary>1 − |β| = 1/(γ(γ + |w|)), with γ² written out.</summary>
     internal static double OneMinusSpeedRatio(double w)
     {
-        double lorentz = LorentzFactor(w);
-        return 1 / lorentz / (lorentz + Math.Abs(w));
+        double size = Math.Abs(w);
+        return 1 / Math.FusedMultiplyAdd(size, size + LorentzFactor(w), 1);
     }
 
     /// <summary>The rapidity, arsinh w.</summary>

@@ -8,7 +8,7 @@ internal static class PhysicsOfLight
     internal const double ElementaryCharge = 1.602176634e-19;
 
     // Quotients of integers that doubles hold exactly; in twice the precision each conversion rounds once.
-    private static readonly Extended JoulePerMegaelectronvolt = (Extended)1602176634 / 1e22;
+    internal static readonly Extended JoulePerMegaelectronvolt = (Extended)1602176634 / 1e22;
 
     private static readonly Extended KilogramPerMegaelectronvolt = JoulePerMegaelectronvolt / Extended.SpeedOfLightSquared;
 
@@ -16,7 +16,9 @@ internal static class PhysicsOfLight
 
     internal static double ToJoules(double megaelectronvolts) => (JoulePerMegaelectronvolt * megaelectronvolts).High;
 
-    internal static double FromJoules(double joules) => ((Extended)joules / JoulePerMegaelectronvolt).High;
+    internal static double FromJoules(Extended joules) => (joules / JoulePerMegaelectronvolt).High;
+
+    internal static double FromSquareJoules(Extended square) => (square / JoulePerMegaelectronvolt / JoulePerMegaelectronvolt).High;
 
     internal static double ToKilograms(double megaelectronvolts) => (KilogramPerMegaelectronvolt * megaelectronvolts).High;
 

@@ -15,10 +15,8 @@ public static class FixedTarget
         return new(kinetic + rest + still, new(momentum, 0, 0));
     }
 
-    /// <summary>√s − m₁c² − m₂c²: what a slow beam makes available, without cancellation.</summary>
-    [return: Unit("J")]
-    [return: Kind(QuantityKind.Energy)]
-    public static double AvailableEnergyInJoules<TLab>(Mass beam, KineticEnergy<TLab> energy, Mass target)
+    /// <summary>√s − m₁c² − m₂c²: what a beam makes available, without cancellation also where it is slow.</summary>
+    public static KineticEnergy<TLab> Available<TLab>(Mass beam, KineticEnergy<TLab> energy, Mass target)
         where TLab : struct, IFrame
     {
         Extended first = Extended.SpeedOfLightSquared * beam.InKilograms;
@@ -26,7 +24,19 @@ public static class FixedTarget
         // s = (m₁ + m₂)² + 2m₂T.
         Extended gain = second * energy.InJoules * 2;
         Extended sum = first + second;
-        return (gain / (Extended.Sqrt((sum * sum) + gain) + sum)).High;
+        return new((gain / (Extended.Sqrt((sum * sum) + gain) + sum)).High);
+    }
+
+    /// <summary>The size of the momentum of either in their centre of momentum: m₂p/√s.</summary>
+    public static Momentum<TLab> CentreMomentum<TLab>(Mass beam, KineticEnergy<TLab> energy, Mass target)
+        where TLab : struct, IFrame
+    {
+        Extended first = Extended.SpeedOfLightSquared * beam.InKilograms;
+        Extended second = Extended.SpeedOfLightSquared * target.InKilograms;
+        Extended kinetic = energy.InJoules;
+        Extended sum = first + second;
+        Extended root = Extended.Sqrt((sum * sum) + (second * kinetic * 2));
+        return new(new((second * Extended.Sqrt(kinetic * (kinetic + (first * 2))) / root / PhysicsOfLight.Speed).High, 0, 0));
     }
 
     /// <summary>The least kinetic energy with which a beam on a target at rest makes products of a total mass.</summary>

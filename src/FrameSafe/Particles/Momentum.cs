@@ -48,6 +48,15 @@ public readonly struct Momentum<TFrame> :
     [Kind(QuantityKind.Momentum)]
     public double InMegaelectronvoltsPerLightSpeed => PhysicsOfLight.FromNewtonSeconds(NewtonSeconds.Norm);
 
+    /// <summary>The components in MeV/c.</summary>
+    [Unit("MeV/c")]
+    [InFrame(nameof(TFrame))]
+    [Kind(QuantityKind.Momentum)]
+    public (double X, double Y, double Z) InMegaelectronvoltsPerLightSpeedComponents => (
+        PhysicsOfLight.FromNewtonSeconds(NewtonSeconds.X),
+        PhysicsOfLight.FromNewtonSeconds(NewtonSeconds.Y),
+        PhysicsOfLight.FromNewtonSeconds(NewtonSeconds.Z));
+
     internal Triple NewtonSeconds { get; }
 
     /// <summary>γmv of a mass and a velocity.</summary>

@@ -46,6 +46,30 @@ public readonly struct SpinPrecession<TLab>
         return Parts(spin + (motion * -1));
     }
 
+    /// <summary>The angular velocity of the motion across a magnetic field, along it: −qB/γm.</summary>
+    /// <exception cref="ArgumentOutOfRangeException">The field is not finite.</exception>
+    [return: Unit("rad/s")]
+    [return: InFrame(nameof(TLab))]
+    public double CyclotronAngularVelocity([Unit("T"), InFrame(nameof(TLab))] double field, [Kind(QuantityKind.LorentzFactor)] double lorentzFactor)
+        => -_chargeOverMass * Require.Finite(field) / Require.Within(lorentzFactor, 1, double.MaxValue);
+
+    /// <summary>The angular velocity of the spin across a magnetic field, along it: −(q/m)B(a + 1/γ).</summary>
+    /// <exception cref="ArgumentOutOfRangeException">The field is not finite.</exception>
+    [return: Unit("rad/s")]
+    [return: InFrame(nameof(TLab))]
+    public double SpinAngularVelocity([Unit("T"), InFrame(nameof(TLab))] double field, [Kind(QuantityKind.LorentzFactor)] double lorentzFactor)
+        => (((Extended)1 / Require.Within(lorentzFactor, 1, double.MaxValue)) + _anomaly).High * -_chargeOverMass * Require.Finite(field);
+
+    /// <summary>The angular velocity of the spin against the motion across a magnetic field, along it: −(q/m)aB; independent of γ.</summary>
+    /// <exception cref="ArgumentOutOfRangeException">The field is not finite.</exception>
+    [return: Unit("rad/s")]
+    [return: InFrame(nameof(TLab))]
+    public double AnomalousAngularVelocity([Unit("T"), InFrame(nameof(TLab))] double field) => -_chargeOverMass * _anomaly * Require.Finite(field);
+
+    /// <summary>Turns of the spin against the motion in one turn of the motion: aγ.</summary>
+    [return: Unit("1")]
+    public double SpinTune([Kind(QuantityKind.LorentzFactor)] double lorentzFactor) => _anomaly * Require.Within(lorentzFactor, 1, double.MaxValue);
+
     /// <summary>γ of the motion at which an electric field leaves spin and motion together: √(1 + 1/a).</summary>
     /// <exception cref="InvalidOperationException">The anomaly is not positive: there is none.</exception>
     [return: Kind(QuantityKind.LorentzFactor)]

@@ -24,7 +24,7 @@ public readonly struct LightAtAngle<TFrame, TOther>
     /// <summary>The received by the sent frequency: f′/f = γ(1 − β cos θ).</summary>
     [Kind(QuantityKind.DopplerFactor)]
     [Between(nameof(TFrame), nameof(TOther))]
-    public double FrequencyRatio => Ratio(_ratio);
+    public double FrequencyRatio => Ratio.High;
 
     /// <summary>f′/f − 1, which a ratio near one cannot hold.</summary>
     [Unit("1")]
@@ -45,7 +45,19 @@ public readonly struct LightAtAngle<TFrame, TOther>
     /// <summary>The angle in the moving frame: tan(θ′/2) = √((1 + β)/(1 − β)) tan(θ/2).</summary>
     [Unit("rad")]
     [InFrame(nameof(TOther))]
-    public double AngleInOther => 2 * Math.Atan2((Celerity.LorentzFactor(_ratio) + _ratio) * Math.Sin(_angle / 2), Math.Cos(_angle / 2));
+    public double AngleInOther => 2 * Math.Atan2(Stretch * Math.Sin(_angle / 2), Math.Cos(_angle / 2));
+
+    /// <summary>cos θ′ = (cos θ − β)/(1 − β cos θ).</summary>
+    [Unit("1")]
+    public double CosineInOther
+    {
+        get
+        {
+            // With u = tan(θ′/2): (1 − u²)/(1 + u²).
+            double u = Stretch * Math.Tan(_angle / 2);
+            return Math.Abs(u) < 1e100 ? (1 - u) * (1 + u) / (1 + (u * u)) : -1;
+        }
+    }
 
     /// <summary>θ′ − θ, the aberration, also where it is a tiny part of the angle.</summary>
     [Unit("rad")]
@@ -53,11 +65,13 @@ public readonly struct LightAtAngle<TFrame, TOther>
     {
         get
         {
+            // 2 atan(k sin θ/(1 − k cos θ)) with k = w/(1 + γ), and 1 − k cos θ counted from the pole where it is small.
+            double size = Math.Abs(_ratio);
             double lorentz = Celerity.LorentzFactor(_ratio);
-            double k = _ratio / (1 + lorentz);
-            double half = Math.Sin(_angle / 2);
-            double oneMinus = (1 + (1 / (lorentz + _ratio))) / (1 + lorentz);
-            return 2 * Math.Atan2(k * Math.Sin(_angle), oneMinus + (2 * k * half * half));
+            double k = size / (1 + lorentz);
+            double half = _ratio > 0 ? Math.Sin(_angle / 2) : Math.Cos(_angle / 2);
+            double oneMinus = (1 + (1 / (lorentz + size))) / (1 + lorentz);
+            return Math.CopySign(2 * Math.Atan2(k * Math.Sin(_angle), oneMinus + (2 * k * half * half)), _ratio);
         }
     }
 
@@ -67,8 +81,8 @@ public readonly struct LightAtAngle<TFrame, TOther>
     {
         get
         {
-            double ratio = FrequencyRatio;
-            return 1 / ratio / ratio;
+            Extended ratio = Ratio;
+            return ((Extended)1 / (ratio * ratio)).High;
         }
     }
 
@@ -88,14 +102,22 @@ public readonly struct LightAtAngle<TFrame, TOther>
 
     internal static LightAtAngle<TFrame, TOther> From(double celerityRatio, double angle) => new(celerityRatio, angle);
 
-    private double Ratio(double w)
+    // √((1 + β)/(1 − β)) = γ + w.
+    private double Stretch => _ratio >= 0 ? Celerity.LorentzFactor(_ratio) + _ratio : 1 / (Celerity.LorentzFactor(_ratio) - _ratio);
+
+    // Only the trigonometric functions round.
+    private Extended Ratio
     {
-        double lorentz = Celerity.LorentzFactor(w);
-        double cosine = Math.Cos(_angle);
-        if (w * cosine <= 0)
-            return lorentz - (w * cosine);
-        // Ahead of the motion: 1/(γ + |w|) + 2|w| sin²(θ/2), the angle counted from the nearer pole.
-        double half = w > 0 ? Math.Sin(_angle / 2) : Math.Cos(_angle / 2);
-        return (1 / (lorentz + Math.Abs(w))) + (2 * Math.Abs(w) * half * half);
+        get
+        {
+            Extended size = Math.Abs(_ratio);
+            Extended lorentz = Math.Abs(_ratio) < 1e100 ? Extended.Sqrt((size * size) + 1) : size;
+            double cosine = Math.Cos(_angle);
+            if (_ratio * cosine <= 0)
+                return lorentz + Extended.Product(Math.Abs(_ratio), Math.Abs(cosine));
+            // Ahead of the motion: 1/(γ + |w|) + 2|w| sin²(θ/2), the angle counted from the nearer pole.
+            double half = _ratio > 0 ? Math.Sin(_angle / 2) : Math.Cos(_angle / 2);
+            return ((Extended)1 / (lorentz + size)) + (size * Extended.Product(half, half) * 2);
+        }
     }
 }
