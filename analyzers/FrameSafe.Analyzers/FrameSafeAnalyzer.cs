@@ -68,7 +68,7 @@ public sealed class FrameSafeAnalyzer : DiagnosticAnalyzer
         AnalyzerConfigOptions options = context.Options.AnalyzerConfigOptionsProvider.GetOptions(observations[0].Place.SyntaxTree);
         var bench = new Bench(knowledge.Frames, Settings.Budget(options, out _));
         foreach (Finding finding in RuleTable.Judge(observations, bench))
-            context.ReportDiagnostic(finding.ToDiagnostic());
+            context.ReportDiagnostic(finding.ToDiagnostic(context.Compilation));
     }
 
     private static void JudgeAttribute(SyntaxNodeAnalysisContext context)
@@ -77,7 +77,7 @@ public sealed class FrameSafeAnalyzer : DiagnosticAnalyzer
         if (!DeclarationAttributes.IsNamedLikeOurs(attribute))
             return;
         foreach (Finding finding in DeclarationAttributes.Judge(attribute, context.SemanticModel, context.CancellationToken))
-            context.ReportDiagnostic(finding.ToDiagnostic());
+            context.ReportDiagnostic(finding.ToDiagnostic(context.Compilation));
     }
 
     private static void JudgeSettings(CompilationAnalysisContext context)
@@ -87,7 +87,7 @@ public sealed class FrameSafeAnalyzer : DiagnosticAnalyzer
         {
             Settings.Budget(context.Options.AnalyzerConfigOptionsProvider.GetOptions(tree), out string? unreadable);
             if (unreadable is not null && reported.Add(unreadable))
-                context.ReportDiagnostic(RuleTable.ImpossibleFrame.JudgeBudget(unreadable).ToDiagnostic());
+                context.ReportDiagnostic(RuleTable.ImpossibleFrame.JudgeBudget(unreadable).ToDiagnostic(context.Compilation));
         }
     }
 }

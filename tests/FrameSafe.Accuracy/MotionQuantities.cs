@@ -45,7 +45,15 @@ internal static class MotionQuantities
             .Add("r", () => [carried.Place.XInMetres, carried.Place.YInMetres, carried.Place.ZInMetres])
             .Add("interval_squared", () => interval.SquareInSquareMetres)
             .AddWord("kind_of_interval", () => interval.Class.ToString().ToLowerInvariant())
-            .Add("invariant", () => interval.Class == IntervalClass.Timelike ? Math.Abs(interval.ProperTimeInSeconds()) : interval.ProperDistanceInMetres());
+            .Add("invariant", () => Invariant(interval));
+    }
+
+    // Seconds or metres, as the file says.
+    private static double Invariant(SpacetimeInterval<Yard> interval)
+    {
+        if (interval.Class == IntervalClass.Timelike)
+            return Math.Abs(interval.ProperTimeInSeconds());
+        return interval.ProperDistanceInMetres();
     }
 
     internal static Quantities Wigner(ReferenceCase given)

@@ -131,6 +131,18 @@ public sealed partial class ToolTests(PackedFeed feed)
         Assert.True(File.Exists(Path.Combine(feed.Repository, "artifacts", "findings.sarif")));
     }
 
+    [Fact]
+    public void The_repositorys_own_code_has_no_finding_but_the_samples_mistakes()
+    {
+        CommandResult survey = Command.Run(feed.Repository, feed.Tool, "survey", "FrameSafe.sln");
+
+        Assert.Equal(1, survey.ExitCode);
+        Assert.Contains("7 findings.", survey.Output);
+        Assert.All(
+            survey.Output.Split('\n').Where(line => FindingLine().IsMatch(line)),
+            line => Assert.StartsWith("samples/Relay.OldStyle/", line));
+    }
+
     private static string[] Run(string folder)
         => Command.Run(folder, "dotnet", "run").MustSucceed().Output.Split('\n', StringSplitOptions.RemoveEmptyEntries);
 
@@ -169,6 +181,9 @@ public sealed partial class ToolTests(PackedFeed feed)
             """);
         return folder;
     }
+
+    [GeneratedRegex(@"^\S+\(\d+,\d+\) ")]
+    private static partial Regex FindingLine();
 
     [GeneratedRegex(@"(-?\d+(?:\.\d+)?(?:E[+-]?\d+)?)")]
     private static partial Regex Number();

@@ -45,10 +45,25 @@ internal sealed class Finding
         return this;
     }
 
-    internal Diagnostic ToDiagnostic()
+    /// <summary>
+    /// The diagnostic, with those origins that stand in the compilation itself: a project's diagnostics may not point into the sources
+    /// of another, though an IDE has them at hand.
+    /// </summary>
+    internal Diagnostic ToDiagnostic(Compilation compilation)
     {
-        if (_originTexts.Count > 0)
-            _properties[FindingProperties.Origins] = string.Join("\n", _originTexts);
-        return Diagnostic.Create(Rule.Descriptor, Place, _origins, _properties.ToImmutable(), Arguments);
+        var locations = new List<Location>();
+        var texts = new List<string>();
+        for (int i = 0; i < _origins.Count; i++)
+        {
+            if (_origins[i].SourceTree is { } tree && compilation.ContainsSyntaxTree(tree))
+            {
+                locations.Add(_origins[i]);
+                texts.Add(_originTexts[i]);
+            }
+        }
+
+        if (texts.Count > 0)
+            _properties[FindingProperties.Origins] = string.Join("\n", texts);
+        return Diagnostic.Create(Rule.Descriptor, Place, locations, _properties.ToImmutable(), Arguments);
     }
 }

@@ -8,6 +8,14 @@ internal static class Literals
 {
     private static readonly Dictionary<double, Scale> ConversionFactors = Build();
 
+    private static readonly Tag SpeedOfLight = new()
+    {
+        Dimension = Dimension.Speed,
+        Scale = Scale.One,
+        Kind = QuantityKind.SignalSpeed,
+        IsConstant = true,
+    };
+
     /// <summary>
     /// Zero and the infinities fit everything. Powers of ten and exact conversion factors are plain numbers that may convert.
     /// Small fractions are plain numbers. Any other literal may hide a unit of its own (an empirical fit): it is unknown.
@@ -17,6 +25,10 @@ internal static class Literals
         if (value == 0 || double.IsNaN(value) || double.IsInfinity(value) || Math.Abs(value) is double.MaxValue or double.Epsilon)
             return Tag.Neutral;
         double size = Math.Abs(value);
+        // The speed of light in metres per second is too odd a number to be anything else. In other units its digits are also a
+        // handbook's (0.299792458·B·r), and unknown.
+        if (size == 299_792_458)
+            return SpeedOfLight;
         if (ConversionFactors.TryGetValue(size, out Scale? factor))
             return Tag.Plain with { Conversion = factor };
         return IsSmallFraction(size) ? Tag.Plain : Tag.Unknown;
@@ -47,7 +59,7 @@ internal static class Literals
         foreach (string factor in new[]
         {
             "60", "3600", "86400", "24", "1440", "7", "365.25", "31557600", "360", "180", "90", "3.6", "0.3048", "0.0254", "0.9144",
-            "1609.344", "1852", "1000000000000000", "299792458", "299792.458", "0.299792458", "299.792458", "149597870700",
+            "1609.344", "1852", "1000000000000000", "149597870700",
             "149597870.7", "1.602176634e-19", "1.602176634e-13", "1.602176634e-10", "4.184", "101325",
         })
         {
