@@ -35,10 +35,11 @@ public sealed class FrameSafeAnalyzer : DiagnosticAnalyzer
     {
         if (context.Compilation.GetTypeByMetadataName(Vocabulary.UnitAttribute) is null)
             return;
-        var knowledge = new Knowledge(context.Compilation);
+        var knowledge = new Knowledge(context.Compilation, context.Options, context.CancellationToken);
         context.RegisterOperationBlockAction(block => JudgeBodies(block, knowledge));
         context.RegisterSyntaxNodeAction(JudgeAttribute, SyntaxKind.Attribute);
-        context.RegisterCompilationEndAction(JudgeSettings);
+        context.RegisterSymbolAction(symbol => JudgeDeclaration(symbol, knowledge.Tags), SymbolKind.Method, SymbolKind.Property, SymbolKind.Field);
+        context.RegisterCompilationEndAction(end => JudgeSettings(end, knowledge));
     }
 
     private static void JudgeBodies(OperationBlockAnalysisContext context, Knowledge knowledge)
@@ -80,14 +81,71 @@ public sealed class FrameSafeAnalyzer : DiagnosticAnalyzer
             context.ReportDiagnostic(finding.ToDiagnostic(context.Compilation));
     }
 
-    private static void JudgeSettings(CompilationAnalysisContext context)
+    private static void JudgeDeclaration(SymbolAnalysisContext context, SymbolTags tags)
     {
+        ISymbol symbol = context.Symbol;
+        if (symbol.IsImplicitlyDeclared || symbol is IMethodSymbol { AssociatedSymbol: not null })
+            return;
+        if (symbol.IsOverride || symbol.ContainingType.AllInterfaces.Length > 0)
+        {
+            Report(RuleTable.ContradictingTags.Judge(symbol, tags));
+            if (symbol is IMethodSymbol method)
+            {
+                foreach (IParameterSymbol parameter in method.Parameters)
+                    Report(RuleTable.ContradictingTags.Judge(parameter, tags));
+            }
+        }
+
+        if (!IsPublic(symbol))
+            return;
+        switch (symbol)
+        {
+            case IFieldSymbol field:
+                Report(RuleTable.UntaggedNumber.Judge(field, field.Type, tags.Of(field)));
+                break;
+            case IPropertySymbol property:
+                Report(RuleTable.UntaggedNumber.Judge(property, property.Type, tags.Of(property)));
+                break;
+            case IMethodSymbol method:
+                Report(RuleTable.UntaggedNumber.Judge(method, method.ReturnType, tags.OfReturn(method)));
+                foreach (IParameterSymbol parameter in method.Parameters)
+                    Report(RuleTable.UntaggedNumber.Judge(parameter, parameter.Type, tags.Of(parameter)));
+                break;
+        }
+
+        void Report(Finding? finding)
+        {
+            if (finding is not null)
+                context.ReportDiagnostic(finding.ToDiagnostic(context.Compilation));
+        }
+    }
+
+    private static bool IsPublic(ISymbol symbol)
+    {
+        for (ISymbol? outer = symbol; outer is not null and not INamespaceSymbol; outer = outer.ContainingSymbol)
+        {
+            if (outer.DeclaredAccessibility is not (Accessibility.Public or Accessibility.Protected or Accessibility.ProtectedOrInternal))
+                return false;
+        }
+
+        return true;
+    }
+
+    private static void JudgeSettings(CompilationAnalysisContext context, Knowledge knowledge)
+    {
+        foreach ((Location place, string message) in knowledge.Contracts.Problems)
+            context.ReportDiagnostic(RuleTable.UnreadableContract.Judge(place, message).ToDiagnostic(context.Compilation));
         var reported = new HashSet<string>();
         foreach (SyntaxTree tree in context.Compilation.SyntaxTrees)
         {
             Settings.Budget(context.Options.AnalyzerConfigOptionsProvider.GetOptions(tree), out string? unreadable);
             if (unreadable is not null && reported.Add(unreadable))
                 context.ReportDiagnostic(RuleTable.ImpossibleFrame.JudgeBudget(unreadable).ToDiagnostic(context.Compilation));
+            foreach (KeyValuePair<string, string> suffix in knowledge.Tags.UnreadableSuffixes(tree))
+            {
+                if (reported.Add(suffix.Key + "=" + suffix.Value))
+                    context.ReportDiagnostic(RuleTable.ImpossibleFrame.JudgeSuffix(suffix.Key, suffix.Value).ToDiagnostic(context.Compilation));
+            }
         }
     }
 }

@@ -35,3 +35,9 @@ internal sealed record Side(Value Value, SyntaxNode? Syntax, string? Description
 /// <param name="Mass">The mass.</param>
 internal sealed record NewtonianForm(
     SyntaxNode Place, QuantityKind Quantity, ImmutableArray<Side> Velocities, Side Mass) : Observation(Place);
+
+/// <summary>A constant at or above the speed of light goes where a velocity is wanted.</summary>
+/// <param name="Place">The constant.</param>
+/// <param name="Ratio">It, as a multiple of c.</param>
+/// <param name="Target">Where it goes.</param>
+internal sealed record FasterThanLight(SyntaxNode Place, double Ratio, Side Target) : Observation(Place);

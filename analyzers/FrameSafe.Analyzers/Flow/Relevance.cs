@@ -21,6 +21,7 @@ internal static class Relevance
                 case IPropertyReferenceOperation property when tags.Of(property.Property) is not null:
                 case IParameterReferenceOperation parameter when tags.Of(parameter.Parameter) is not null:
                 case IInvocationOperation call when tags.OfReturn(call.TargetMethod) is not null || AnyTagged(call.TargetMethod, tags):
+                case IVariableDeclaratorOperation declarator when tags.OfLocal(declarator.Symbol) is not null:
                 case IObjectCreationOperation { Constructor: { } constructor } when AnyTagged(constructor, tags):
                     return true;
             }
@@ -31,8 +32,6 @@ internal static class Relevance
 
     private static bool AnyTagged(IMethodSymbol method, SymbolTags tags)
     {
-        if (!tags.MayCarryTags(method.ContainingAssembly))
-            return false;
         foreach (IParameterSymbol parameter in method.Parameters)
         {
             if (tags.Of(parameter) is not null)

@@ -53,6 +53,8 @@ internal sealed partial class Walk
         Value value = initializer is null ? Value.Unknown : Visit(initializer.Value);
         foreach (IOperation ignored in operation.IgnoredArguments)
             Visit(ignored);
+        if (Tags.OfLocal(operation.Symbol) is { } named)
+            value = Deliver(value, initializer?.Value, named, "local `" + operation.Symbol.Name + "`", "assigned");
         _environment.Set(operation.Symbol, value);
         return value;
     }
@@ -92,6 +94,8 @@ internal sealed partial class Walk
     {
         if (target is null)
             return value;
+        if (source is not null)
+            CheckSpeed(source, target, description);
         Outcome outcome = TagAlgebra.Assign(value.Tag, target.Tag);
         if (source is not null)
         {
@@ -105,6 +109,21 @@ internal sealed partial class Walk
         }
 
         return Value.Of(outcome.Result, target.Origin);
+    }
+
+    // A constant that no body can have as its velocity.
+    private void CheckSpeed(IOperation source, Declaration target, string description)
+    {
+        if (target.Tag.Kind is not (QuantityKind.Velocity or QuantityKind.SpeedRatio) || source.ConstantValue is not { HasValue: true, Value: { } constant }
+            || constant is not (double or float or int or long))
+        {
+            return;
+        }
+
+        double speed = System.Convert.ToDouble(constant, System.Globalization.CultureInfo.InvariantCulture);
+        double? light = target.Tag.Kind == QuantityKind.SpeedRatio || target.Tag.Dimension is { IsOne: true } ? 1 : LightSpeed.ValueIn(target.Tag);
+        if (light is { } limit && System.Math.Abs(speed) >= limit && !double.IsInfinity(speed) && _environment.IsReachable)
+            _others.Add(new FasterThanLight(source.Syntax, speed / limit, new(Value.Of(target), null, description)));
     }
 
     // What a sum or difference goes to tells which of its operands is the one to be mended; and the reading of one clock less
@@ -132,6 +151,7 @@ internal sealed partial class Walk
         switch (target)
         {
             case ILocalReferenceOperation local:
+                value = Deliver(value, source, Tags.OfLocal(local.Local), "local `" + local.Local.Name + "`", verb);
                 _environment.Set(local.Local, value);
                 return value;
             case IParameterReferenceOperation parameter:

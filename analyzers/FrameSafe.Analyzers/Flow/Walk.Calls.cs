@@ -133,12 +133,24 @@ internal sealed partial class Walk
             }
             else
             {
-                Deliver(values[i], argument.ArgumentKind == ArgumentKind.DefaultValue ? null : argument.Value, declared, Describe(parameter), "passed");
+                Deliver(
+                    values[i],
+                    argument.ArgumentKind == ArgumentKind.DefaultValue ? null : argument.Value,
+                    declared,
+                    Describe(parameter),
+                    IsBackwards(parameter, values[i]) ? Backwards : "passed");
             }
         }
 
         return values;
     }
+
+    /// <summary>The verb of a number that goes into a transform of which it is what should come out.</summary>
+    internal const string Backwards = "put in backwards";
+
+    private bool IsBackwards(IParameterSymbol parameter, Value value)
+        => value.Tag.Frame is { } frame && parameter.ContainingSymbol is IMethodSymbol method && Tags.IsTransform(method)
+            && frame.Equals(Tags.OfReturn(method)?.Tag.Frame);
 
     // The values of plain arguments in the order of the parameters; null where there are lambdas, references or none.
     private Value[]? Values(ImmutableArray<IArgumentOperation> arguments)

@@ -83,7 +83,7 @@ internal sealed partial class Walk
         sides.RemoveAt(mass);
         if (_environment.IsReachable)
         {
-            _newtonian.Add(new(
+            _others.Add(new NewtonianForm(
                 operation.Syntax, isEnergy ? QuantityKind.KineticEnergy : QuantityKind.Momentum, sides.ToImmutable(), massSide));
         }
     }

@@ -19,7 +19,7 @@ internal sealed partial class Walk : OperationVisitor<object?, Value>
     private readonly CancellationToken _cancellation;
     private readonly Environment _environment = new();
     private readonly List<Encounter> _encounters = [];
-    private readonly List<NewtonianForm> _newtonian = [];
+    private readonly List<Observation> _others = [];
     private readonly Stack<Jumps> _jumps = new();
     private readonly int _depth;
     private readonly bool _isBoundary;
@@ -36,7 +36,7 @@ internal sealed partial class Walk : OperationVisitor<object?, Value>
     }
 
     /// <summary>What the walk noted, in the order of the code.</summary>
-    internal IEnumerable<Observation> Observations => ((IEnumerable<Observation>)_encounters).Concat(_newtonian)
+    internal IEnumerable<Observation> Observations => ((IEnumerable<Observation>)_encounters).Concat(_others)
         .OrderBy(static observation => observation.Place.SpanStart);
 
     /// <summary>What the body returns, over all its returns.</summary>
@@ -72,13 +72,13 @@ internal sealed partial class Walk : OperationVisitor<object?, Value>
 
     private SymbolTags Tags => _knowledge.Tags;
 
-    private (int Encounters, int Newtonian) Noted => (_encounters.Count, _newtonian.Count);
+    private (int Encounters, int Others) Noted => (_encounters.Count, _others.Count);
 
     // What was noted since will be noted again, or is noted elsewhere.
-    private void Forget((int Encounters, int Newtonian) noted)
+    private void Forget((int Encounters, int Others) noted)
     {
         _encounters.RemoveRange(noted.Encounters, _encounters.Count - noted.Encounters);
-        _newtonian.RemoveRange(noted.Newtonian, _newtonian.Count - noted.Newtonian);
+        _others.RemoveRange(noted.Others, _others.Count - noted.Others);
     }
 
     private void Note(SyntaxNode place, Clash? clash, Side left, Side right, string verb)

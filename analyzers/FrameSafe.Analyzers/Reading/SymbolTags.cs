@@ -1,7 +1,10 @@
+using System;
 using System.Collections.Concurrent;
+using System.Collections.Generic;
 using System.Collections.Immutable;
 using FrameSafe.Analyzers.Tags;
 using Microsoft.CodeAnalysis;
+using Microsoft.CodeAnalysis.Diagnostics;
 
 namespace FrameSafe.Analyzers.Reading;
 
@@ -16,8 +19,23 @@ internal sealed class SymbolTags
     private readonly ConcurrentDictionary<IMethodSymbol, Declaration> _returns = new(SymbolEqualityComparer.Default);
     private readonly ConcurrentDictionary<IAssemblySymbol, bool> _tagged = new(SymbolEqualityComparer.Default);
     private readonly IAssemblySymbol _assembly;
+    private readonly NameSuffixes _suffixes;
 
-    internal SymbolTags(Compilation compilation) => _assembly = compilation.Assembly;
+    /// <summary>What contract files say of members that are not this project's to tag.</summary>
+    private readonly Func<ISymbol, Declaration?> _contracts;
+    private readonly Func<IMethodSymbol, Declaration?> _returnContracts;
+
+    internal SymbolTags(
+        Compilation compilation,
+        AnalyzerConfigOptionsProvider? options = null,
+        Func<ISymbol, Declaration?>? contracts = null,
+        Func<IMethodSymbol, Declaration?>? returnContracts = null)
+    {
+        _contracts = contracts ?? (static _ => null);
+        _returnContracts = returnContracts ?? (static _ => null);
+        _assembly = compilation.Assembly;
+        _suffixes = new(compilation, options);
+    }
 
     /// <summary>Whether anything that is declared in an assembly can carry a tag.</summary>
     internal bool MayCarryTags(IAssemblySymbol? assembly)
@@ -26,19 +44,50 @@ internal sealed class SymbolTags
     /// <summary>The declared tag of a parameter, field or property; null where nothing is declared.</summary>
     internal Declaration? Of(ISymbol symbol)
     {
-        if (symbol is not (IParameterSymbol or IFieldSymbol or IPropertySymbol) || !MayCarryTags(symbol.ContainingAssembly))
+        if (symbol is not (IParameterSymbol or IFieldSymbol or IPropertySymbol))
             return null;
+        if (!MayCarryTags(symbol.ContainingAssembly))
+            return _contracts(symbol);
         Declaration found = _declarations.GetOrAdd(symbol, Read);
-        return ReferenceEquals(found, Nothing) ? null : found;
+        return ReferenceEquals(found, Nothing) ? _contracts(symbol) : found;
     }
+
+    /// <summary>What the name of a local says of it; null where no suffix is agreed on that it ends with.</summary>
+    internal Declaration? OfLocal(ILocalSymbol local)
+        => IsNumber(local.Type) && _suffixes.Of(local) is { } type
+            ? new(Whose(Tag.Unknown, type), new("local", local.Name, local.Locations[0]))
+            : null;
 
     /// <summary>The declared tag of what a method returns (of the element of a task or collection); null where nothing is declared.</summary>
     internal Declaration? OfReturn(IMethodSymbol method)
     {
-        if (method.ReturnsVoid || !MayCarryTags(method.ContainingAssembly))
+        if (method.ReturnsVoid)
             return null;
+        if (!MayCarryTags(method.ContainingAssembly))
+            return _returnContracts(method);
         Declaration found = _returns.GetOrAdd(method, ReadReturn);
-        return ReferenceEquals(found, Nothing) ? null : found;
+        return ReferenceEquals(found, Nothing) ? _returnContracts(method) : found;
+    }
+
+    /// <summary>The suffix settings of a tree that name no frame or clock.</summary>
+    internal IEnumerable<KeyValuePair<string, string>> UnreadableSuffixes(SyntaxTree tree) => _suffixes.Unreadable(tree);
+
+    /// <summary>What the tags of a declaration contradict: the member that it overrides or implements; null where nothing is.</summary>
+    internal (Declaration Own, Declaration Elder)? Contradiction(ISymbol symbol)
+    {
+        Declaration? own = symbol is IMethodSymbol method
+            ? TagAttributes.Read(method.GetReturnTypeAttributes(), method) is { } result ? new(result.ToTag(), Origin.Of(method)) : null
+            : TagAttributes.Read(symbol.GetAttributes(), symbol) is { } tags ? new(tags.ToTag(), Origin.Of(symbol)) : null;
+        if (own is null)
+            return null;
+        Declaration? elder = symbol switch
+        {
+            IMethodSymbol returning => ElderMethod(returning) is { } overridden ? OfReturn(overridden) : null,
+            IParameterSymbol parameter => ElderParameter(parameter) is { } overridden ? Of(overridden) : null,
+            IPropertySymbol property => ElderProperty(property) is { } overridden ? Of(overridden) : null,
+            _ => null,
+        };
+        return elder is not null && TagAlgebra.Assign(own.Tag, elder.Tag).Clash is not null ? (own, elder) : null;
     }
 
     /// <summary>Whether a member is itself a crossing, or carries numbers between frames, which is the same.</summary>
@@ -90,15 +139,47 @@ internal sealed class SymbolTags
     private Declaration Read(ISymbol symbol)
     {
         if (TagAttributes.Read(symbol.GetAttributes(), symbol) is { } own)
-            return new(Known(own.ToTag(), symbol), Origin.Of(symbol));
+            return new(Known(Suffixed(own, symbol), symbol), Origin.Of(symbol));
         ISymbol? elder = symbol switch
         {
             IParameterSymbol parameter => ElderParameter(parameter),
             IPropertySymbol property => (ISymbol?)PositionalParameter(property) ?? ElderProperty(property),
             _ => null,
         };
-        return elder is not null && Of(elder) is { } inherited ? inherited : Nothing;
+        if (elder is not null && Of(elder) is { } inherited)
+            return inherited;
+        return TypeOf(symbol) is { } number && IsNumber(number) && _suffixes.Of(symbol) is { } type
+            ? new(Whose(Tag.Unknown, type), Origin.Of(symbol))
+            : Nothing;
     }
+
+    // An attribute says it before a name does.
+    private Tag Suffixed(TagAttributes own, ISymbol symbol)
+    {
+        if (own.Frame is not null || own.Clock is not null || own.Between is not null || _suffixes.Of(symbol) is not { } type)
+            return own.ToTag();
+        return Vocabulary.Implements(type, Vocabulary.Frame)
+            ? Tag.Declared(own.Unit, FrameNames.Frame(type), null, own.Kind, null, own.Speed)
+            : Tag.Declared(own.Unit, null, FrameNames.Clock(type), own.Kind, null, own.Speed);
+    }
+
+    private static Tag Whose(Tag tag, ITypeSymbol type)
+        => Vocabulary.Implements(type, Vocabulary.Frame)
+            ? tag with { Frame = FrameNames.Frame(type) }
+            : tag with { Clock = FrameNames.Clock(type) };
+
+    private static ITypeSymbol? TypeOf(ISymbol symbol) => symbol switch
+    {
+        IParameterSymbol parameter => parameter.Type,
+        IFieldSymbol field => field.Type,
+        IPropertySymbol property => property.Type,
+        _ => null,
+    };
+
+    private static bool IsNumber(ITypeSymbol type)
+        => type.SpecialType is SpecialType.System_Double or SpecialType.System_Single or SpecialType.System_Decimal
+            || (type is IArrayTypeSymbol array && IsNumber(array.ElementType))
+            || (type is { Name: "Vector2" or "Vector3" or "Vector4", ContainingNamespace.Name: "Numerics" });
 
     private Declaration ReadReturn(IMethodSymbol method)
     {

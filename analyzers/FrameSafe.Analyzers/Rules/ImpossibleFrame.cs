@@ -57,6 +57,12 @@ internal sealed class ImpossibleFrame : Rule
             Location.None,
             "The setting " + Settings.ErrorBudget + " is `" + text + "`; a positive number is wanted, such as 1e-9 (which is used instead)");
 
+    internal Finding JudgeSuffix(string setting, string value)
+        => new(
+            this,
+            Location.None,
+            "The setting " + setting + " is `" + value + "`, which is no frame or clock; the full name of a type that implements IFrame or IClock is wanted");
+
     // The chain from a frame through one of its parents back to it, the frame first.
     private static List<INamedTypeSymbol>? Circle(INamedTypeSymbol frame, ITypeSymbol parent)
     {

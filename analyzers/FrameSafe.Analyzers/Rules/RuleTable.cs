@@ -13,11 +13,18 @@ internal static class RuleTable
 
     internal static ImpossibleFrame ImpossibleFrame { get; } = new();
 
+    internal static ContradictingTags ContradictingTags { get; } = new();
+
+    internal static UnreadableContract UnreadableContract { get; } = new();
+
+    internal static UntaggedNumber UntaggedNumber { get; } = new();
+
     internal static ImmutableArray<Rule> All { get; } =
     [
         new MixedFrames(),
         new WrongFrame(),
         new MixedTransforms(),
+        new TransformDirection(),
         new Simultaneity(),
         new ProperAndCoordinateTime(),
         new LorentzDirection(),
@@ -25,6 +32,7 @@ internal static class RuleTable
         new MixedTimeScales(),
         new VelocityAddition(),
         new NewtonianMotion(),
+        new FasterThanLightRule(),
         new SeparationRateAsVelocity(),
         new ProperLength(),
         new CelerityAsVelocity(),
@@ -35,6 +43,9 @@ internal static class RuleTable
         new FunctionArgument(),
         UnreadableUnit,
         new NaturalUnits(),
+        UntaggedNumber,
+        ContradictingTags,
+        UnreadableContract,
         ImpossibleFrame,
     ];
 

@@ -31,7 +31,7 @@ internal sealed class WrongFrame : MeetingRule
                 Left(encounter), "relates " + Pair(left), Right(encounter), Pair(right));
         }
 
-        if (encounter.Clash is not { Kind: ClashKind.Frame, Meeting: Meeting.Target })
+        if (encounter.Clash is not { Kind: ClashKind.Frame, Meeting: Meeting.Target } || encounter.Verb == Walk.Backwards)
             return null;
         return Report(
                 encounter,

@@ -43,10 +43,10 @@ internal static class Source
             new CSharpCompilationOptions(OutputKind.DynamicallyLinkedLibrary, allowUnsafe: true, nullableContextOptions: NullableContextOptions.Enable));
 
     /// <summary>The findings in the order of the code; it fails if the analyzer threw.</summary>
-    internal static ImmutableArray<Diagnostic> Findings(Compilation compilation, IReadOnlyDictionary<string, string>? settings = null, bool concurrent = true)
+    internal static ImmutableArray<Diagnostic> Findings(Compilation compilation, IReadOnlyDictionary<string, string>? settings = null, bool concurrent = true, string? contract = null)
     {
         var options = new CompilationWithAnalyzersOptions(
-            new AnalyzerOptions([], new FixedSettings(settings ?? ImmutableDictionary<string, string>.Empty)),
+            new AnalyzerOptions(contract is null ? [] : [new ContractFile(contract)], new FixedSettings(settings ?? ImmutableDictionary<string, string>.Empty)),
             onAnalyzerException: null,
             concurrentAnalysis: concurrent,
             logAnalyzerExecutionTime: false);
@@ -54,6 +54,14 @@ internal static class Source
             .GetAnalyzerDiagnosticsAsync().GetAwaiter().GetResult();
         Assert.True(found.All(diagnostic => diagnostic.Id != "AD0001"), found.FirstOrDefault(diagnostic => diagnostic.Id == "AD0001")?.ToString());
         return [.. found.OrderBy(diagnostic => diagnostic.Location.SourceTree?.FilePath).ThenBy(diagnostic => diagnostic.Location.SourceSpan.Start)];
+    }
+
+    private sealed class ContractFile(string text) : AdditionalText
+    {
+        public override string Path => "orbits.framesafe.json";
+
+        public override Microsoft.CodeAnalysis.Text.SourceText GetText(CancellationToken cancellationToken = default)
+            => Microsoft.CodeAnalysis.Text.SourceText.From(text);
     }
 
     private sealed class FixedSettings(IReadOnlyDictionary<string, string> settings) : AnalyzerConfigOptionsProvider
@@ -66,6 +74,8 @@ internal static class Source
 
         private sealed class Options(IReadOnlyDictionary<string, string> settings) : AnalyzerConfigOptions
         {
+            public override IEnumerable<string> Keys => settings.Keys;
+
             public override bool TryGetValue(string key, [System.Diagnostics.CodeAnalysis.MaybeNullWhen(false)] out string value)
                 => settings.TryGetValue(key, out value);
         }
