@@ -23,7 +23,7 @@ internal sealed partial class Walk
         Value[] arguments = Arguments(operation.Arguments);
         if (Tags.OfReturn(method) is { } declared)
             return Value.Of(declared).With(Passed(declared.Tag, operation));
-        if (method.Name is "GetEnumerator" or "AsSpan" or "AsMemory" or "Slice" or "Clone" or "ToArray" or "ConfigureAwait" or "GetValueOrDefault"
+        if (method.Name is "FromResult" or "GetEnumerator" or "AsSpan" or "AsMemory" or "Slice" or "Clone" or "ToArray" or "ConfigureAwait" or "GetValueOrDefault"
             or "AsReadOnly" or "GetAwaiter" or "GetResult")
         {
             return operation.Instance is null && arguments.Length > 0 ? arguments[0] : instance;
@@ -37,7 +37,9 @@ internal sealed partial class Walk
     public override Value VisitObjectCreation(IObjectCreationOperation operation, object? argument)
     {
         Value[] arguments = Arguments(operation.Arguments);
-        Visit(operation.Initializer);
+        Value? elements = CollectionElements(operation.Initializer);
+        if (elements is null)
+            Visit(operation.Initializer);
         if (KnownMembers.IsVector(operation.Type))
         {
             Value? all = null;
@@ -46,8 +48,31 @@ internal sealed partial class Walk
             return all ?? Value.Unknown;
         }
 
+        if (elements is not null && IsCollection(operation.Type))
+            return elements;
         // A new collection holds nothing yet, and will hold what is put in.
         return operation is { Arguments.Length: 0, Initializer: null } && IsCollection(operation.Type) ? Value.Of(Tag.Neutral) : Value.Unknown;
+    }
+
+    // The elements of a collection initialiser, where each is added by one argument.
+    private Value? CollectionElements(IObjectOrCollectionInitializerOperation? initializer)
+    {
+        if (initializer is null || initializer.Initializers.Length == 0)
+            return null;
+        foreach (IOperation added in initializer.Initializers)
+        {
+            if (added is not IInvocationOperation { Arguments.Length: 1 })
+                return null;
+        }
+
+        Value? all = null;
+        foreach (IOperation added in initializer.Initializers)
+        {
+            Value value = Arguments(((IInvocationOperation)added).Arguments)[0];
+            all = all is null ? value : Value.Merge(all, value);
+        }
+
+        return all;
     }
 
     public override Value VisitDelegateCreation(IDelegateCreationOperation operation, object? argument)

@@ -28,9 +28,11 @@ internal sealed partial class Walk
 
     public override Value VisitFieldReference(IFieldReferenceOperation operation, object? argument)
     {
-        Visit(operation.Instance);
+        Value instance = Visit(operation.Instance);
         if (Tags.Of(operation.Field) is { } declared)
             return Value.Of(declared);
+        if (!operation.Field.IsStatic && KnownMembers.IsVector(operation.Field.ContainingType))
+            return instance;
         return KnownMembers.Constant(operation.Field) is { } known ? Value.Of(known)
             : operation.Field.HasConstantValue ? Constant(operation.Field.ConstantValue)
             : TupleElement(operation);
@@ -140,10 +142,11 @@ internal sealed partial class Walk
 
     public override Value VisitConditionalAccessInstance(IConditionalAccessInstanceOperation operation, object? argument)
     {
-        // The receiver is the operand of the nearest access that this stands in.
-        for (IOperation? outer = operation.Parent; outer is not null; outer = outer.Parent)
+        // The receiver is the operand of the nearest access on whose far side this stands.
+        IOperation side = operation;
+        for (IOperation? outer = operation.Parent; outer is not null; side = outer, outer = outer.Parent)
         {
-            if (outer is IConditionalAccessOperation access && access.WhenNotNull.Syntax.Span.Contains(operation.Syntax.Span))
+            if (outer is IConditionalAccessOperation access && access.WhenNotNull == side)
                 return Quietly(access.Operation);
         }
 

@@ -5,6 +5,7 @@ using System.Threading;
 using FrameSafe.Analyzers.Reading;
 using FrameSafe.Analyzers.Tags;
 using Microsoft.CodeAnalysis;
+using Microsoft.CodeAnalysis.CSharp.Syntax;
 using Microsoft.CodeAnalysis.Operations;
 
 namespace FrameSafe.Analyzers.Flow;
@@ -58,14 +59,31 @@ internal sealed partial class Walk : OperationVisitor<object?, Value>
             return Value.Unknown;
         _cancellation.ThrowIfCancellationRequested();
         RuntimeHelpers.EnsureSufficientExecutionStack();
-        return operation.Accept(this, argument) ?? Value.Unknown;
+        // What the compiler has no kind for, its visitor passes over.
+        return (operation.Kind == OperationKind.None ? DefaultVisit(operation, argument) : operation.Accept(this, argument)) ?? Value.Unknown;
     }
 
     public override Value DefaultVisit(IOperation operation, object? argument)
     {
+        // The one array creation that the compiler's operations have no kind for; its element is what is put in.
+        if (operation.Kind == OperationKind.None && operation.Syntax is StackAllocArrayCreationExpressionSyntax or ImplicitStackAllocArrayCreationExpressionSyntax)
+            return StackAllocated(operation);
         foreach (IOperation child in operation.ChildOperations)
             Visit(child);
         return Value.Unknown;
+    }
+
+    private Value StackAllocated(IOperation operation)
+    {
+        Value elements = Value.Of(Tag.Neutral);
+        foreach (IOperation child in operation.ChildOperations)
+        {
+            Value value = Visit(child);
+            if (child.Type?.SpecialType is not (SpecialType.System_Int32 or SpecialType.System_Int64))
+                elements = Value.Merge(elements, value);
+        }
+
+        return elements;
     }
 
     private bool IsUnstable(ISymbol variable) => _assignments?.IsUnstable(variable) == true;
