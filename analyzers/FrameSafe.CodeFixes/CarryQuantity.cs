@@ -26,6 +26,8 @@ public sealed class CarryQuantity : Repair
     {
         if (model.Compilation.GetTypeByMetadataName(Vocabulary.UnitAttribute) is null)
             yield break;
+        // The first choice is the best everywhere, whichever transform it is there: Fix All takes it.
+        int choice = 0;
         foreach ((ExpressionSyntax operand, INamedTypeSymbol from, INamedTypeSymbol to) in Mismatches(place, model, cancellation))
         {
             var scope = new Scope(model, operand, cancellation);
@@ -42,7 +44,7 @@ public sealed class CarryQuantity : Repair
                     break;
                 yield return new(
                     "Express `" + operand + "` in " + target.Name + " through " + way.Description,
-                    nameof(CarryQuantity) + ":" + way.Text + ":" + source.Name + ":" + target.Name,
+                    nameof(CarryQuantity) + ":" + (++choice).ToString(System.Globalization.CultureInfo.InvariantCulture),
                     operand,
                     current => Code.Parse(way.Applied(current.WithoutTrivia().ToString())).WithTriviaFrom(current));
             }

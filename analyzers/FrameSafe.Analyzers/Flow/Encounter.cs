@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using FrameSafe.Analyzers.Formulas;
 using FrameSafe.Analyzers.Tags;
 using Microsoft.CodeAnalysis;
 
@@ -41,3 +42,23 @@ internal sealed record NewtonianForm(
 /// <param name="Ratio">It, as a multiple of c.</param>
 /// <param name="Target">Where it goes.</param>
 internal sealed record FasterThanLight(SyntaxNode Place, double Ratio, Side Target) : Observation(Place);
+
+/// <summary>A formula that is almost a known one.</summary>
+/// <param name="Place">The expression.</param>
+/// <param name="Form">The known one, in words.</param>
+/// <param name="Flaw">What is wrong.</param>
+/// <param name="Right">The known one, as it is written.</param>
+/// <param name="Velocities">The velocities in it.</param>
+internal sealed record FlawedForm(SyntaxNode Place, string Form, string Flaw, string Right, ImmutableArray<Side> Velocities) : Observation(Place);
+
+/// <summary>γ − 1 of a velocity, by a subtraction that loses what it is to give.</summary>
+/// <param name="Place">The subtraction.</param>
+/// <param name="Formula">It as mathematics.</param>
+/// <param name="Velocities">The velocity, or its components.</param>
+internal sealed record LostDigits(SyntaxNode Place, Formula Formula, ImmutableArray<Side> Velocities) : Observation(Place);
+
+/// <summary>A rounded value of the speed of light.</summary>
+/// <param name="Place">The number.</param>
+/// <param name="Error">Its relative error.</param>
+/// <param name="Exact">The exact value in its unit.</param>
+internal sealed record RoundedConstant(SyntaxNode Place, double Error, double Exact) : Observation(Place);

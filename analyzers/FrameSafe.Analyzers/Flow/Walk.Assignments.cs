@@ -95,7 +95,11 @@ internal sealed partial class Walk
         if (target is null)
             return value;
         if (source is not null)
+        {
             CheckSpeed(source, target, description);
+            CheckConstant(source, target.Tag);
+        }
+
         Outcome outcome = TagAlgebra.Assign(value.Tag, target.Tag);
         if (source is not null)
         {

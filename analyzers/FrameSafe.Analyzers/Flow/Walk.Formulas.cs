@@ -14,6 +14,10 @@ internal sealed partial class Walk
     /// <summary>What is known of an operation once the formula that it completes is recognised.</summary>
     private Value Recognise(IBinaryOperation operation, Value value)
     {
+        if (operation.OperatorKind == BinaryOperatorKind.Subtract && operation.RightOperand.ConstantValue is { HasValue: true, Value: 1 or 1.0 })
+            NoteLostDigits(operation);
+        if (operation.OperatorKind == BinaryOperatorKind.Divide && NoteFlaw(operation) is { } meant)
+            return meant;
         if (operation.OperatorKind is not (BinaryOperatorKind.Multiply or BinaryOperatorKind.Divide) || value.Tag.Dimension is not { } dimension)
             return value;
         if (operation.OperatorKind == BinaryOperatorKind.Divide && (dimension == Dimension.Speed || dimension.IsOne))
@@ -55,6 +59,61 @@ internal sealed partial class Walk
         return Value.Of(
             Tag.Declared(Unit.One, kind: QuantityKind.LorentzFactor),
             velocities[0].Origin);
+    }
+
+    // Almost γ, or almost the composition: of tagged velocities alone, with c in it by value.
+    private Value? NoteFlaw(IBinaryOperation operation)
+    {
+        IOperation numerator = operation.LeftOperand;
+        while (numerator is IParenthesizedOperation or IConversionOperation)
+            numerator = numerator is IConversionOperation conversion ? conversion.Operand : ((IParenthesizedOperation)numerator).Operand;
+        bool isOne = numerator.ConstantValue is { HasValue: true, Value: 1 or 1.0 or 1f };
+        bool isSum = numerator is IBinaryOperation { OperatorKind: BinaryOperatorKind.Add or BinaryOperatorKind.Subtract };
+        if (!isOne && !isSum)
+            return null;
+        Value[]? velocities = Velocities(operation, out ReadFormula? read);
+        if (velocities is null || ScaleOfLight(velocities[0].Tag) is not { } light || (light != 1 && velocities[0].Tag.Frame is null))
+            return null;
+        string? flaw = isOne ? KnownForms.FlawOfLorentzFactor(read!.Formula, velocities.Length, light)
+            : velocities.Length == 2 ? KnownForms.FlawOfComposition(read!.Formula, light)
+            : null;
+        if (flaw is null || !_environment.IsReachable)
+            return null;
+        _encounters.RemoveAll(encounter => read!.Places.Contains(encounter.Place));
+        _others.Add(new FlawedForm(
+            operation.Syntax,
+            isOne ? "the Lorentz factor" : "the composition of velocities",
+            flaw,
+            isOne ? "1/√(1 − v²/c²)" : "(u ± v)/(1 ± uv/c²)",
+            [.. velocities.Select((value, i) => new Side(value, read!.Variables[i].Syntax, Operation: read.Variables[i]))]));
+        return isOne ? Value.Of(Tag.Declared(Unit.One, kind: QuantityKind.LorentzFactor), velocities[0].Origin) : velocities[0].With(velocities[0].Tag with { Frame = null });
+    }
+
+    private void NoteLostDigits(IBinaryOperation operation)
+    {
+        Value[]? velocities = Velocities(operation, out ReadFormula? read);
+        if (velocities is null || ScaleOfLight(velocities[0].Tag) is not { } light
+            || !KnownForms.IsLorentzFactorMinusOne(read!.Formula, velocities.Length, light) || !_environment.IsReachable)
+        {
+            return;
+        }
+
+        _others.Add(new LostDigits(
+            operation.Syntax, read.Formula, [.. velocities.Select((value, i) => new Side(value, read.Variables[i].Syntax, Operation: read.Variables[i]))]));
+    }
+
+    // A speed that nobody measures in a frame, a thousandth or less beside that of light, is meant for it.
+    private void CheckConstant(IOperation source, Tag target)
+    {
+        if (target is not { Frame: null, Kind: QuantityKind.Unspecified or QuantityKind.SignalSpeed } || target.Dimension != Dimension.Speed
+            || source.ConstantValue is not { HasValue: true, Value: double value } || LightSpeed.ValueIn(target) is not { } exact)
+        {
+            return;
+        }
+
+        double error = System.Math.Abs((value / exact) - 1);
+        if (error is > 0 and < 1e-3 && _environment.IsReachable)
+            _others.Add(new RoundedConstant(source.Syntax, error, exact));
     }
 
     private void NoteNewtonian(IOperation operation, Dimension dimension)

@@ -26,6 +26,48 @@ internal static class KnownForms
     internal static bool IsLorentzFactor(Formula formula, int components, double lightSpeed)
         => Agrees(formula, components, lightSpeed, static values => 1 / Math.Sqrt(1 - SumOfSquares(values, -1)), 1);
 
+    /// <summary>Whether a formula of one velocity, or of its components, is γ − 1.</summary>
+    internal static bool IsLorentzFactorMinusOne(Formula formula, int components, double lightSpeed)
+        => Agrees(formula, components, lightSpeed, static values => (1 / Math.Sqrt(1 - SumOfSquares(values, -1))) - 1, 1);
+
+    /// <summary>
+    /// What is wrong with a formula that is almost the Lorentz factor of a velocity; null where it is that, or nothing like it. A lost
+    /// power of c shows where the velocity is taken in units of another power of it.
+    /// </summary>
+    internal static string? FlawOfLorentzFactor(Formula formula, int components, double lightSpeed)
+    {
+        Func<double[], double> right = static values => 1 / Math.Sqrt(1 - SumOfSquares(values, -1));
+        if (lightSpeed != 1 && Agrees(formula, components, 1, right, 1))
+            return "c is missing";
+        if (lightSpeed != 1 && Agrees(formula, components, Math.Sqrt(lightSpeed), right, 1))
+            return "c is not squared";
+        if (Agrees(formula, components, lightSpeed, static values => 1 / Math.Sqrt(1 + SumOfSquares(values, -1)), 1))
+            return "the sign of v²/c² is wrong";
+        if (components != 1)
+            return null;
+        if (Agrees(formula, 1, lightSpeed, static values => 1 / Math.Sqrt(1 - values[0]), 1))
+            return "v/c is not squared";
+        return lightSpeed != 1 && Agrees(formula, 1, lightSpeed * lightSpeed, static values => 1 / Math.Sqrt(1 - values[0]), 1)
+            ? "v is not squared"
+            : null;
+    }
+
+    /// <summary>What is wrong with a formula that is almost the composition of two velocities; null where it is that, or nothing like it.</summary>
+    internal static string? FlawOfComposition(Formula formula, double lightSpeed)
+    {
+        Func<double[], double> sum = static values => (values[0] + values[1]) / (1 + (values[0] * values[1]));
+        Func<double[], double> difference = static values => (values[0] - values[1]) / (1 - (values[0] * values[1]));
+        if (lightSpeed != 1 && (Agrees(formula, 2, 1, sum, 1) || Agrees(formula, 2, 1, difference, 1)))
+            return "c² is missing";
+        double root = Math.Sqrt(lightSpeed);
+        if (lightSpeed != 1 && (Agrees(formula, 2, root, sum, root) || Agrees(formula, 2, root, difference, root)))
+            return "c is not squared";
+        return Agrees(formula, 2, lightSpeed, static values => (values[0] + values[1]) / (1 - (values[0] * values[1])), lightSpeed)
+            || Agrees(formula, 2, lightSpeed, static values => (values[0] - values[1]) / (1 + (values[0] * values[1])), lightSpeed)
+            ? "the sign of uv/c² is wrong"
+            : null;
+    }
+
     /// <summary>
     /// Whether a formula is ½m·Σv² of a mass (by its index) and any number of velocity components, also where they are large
     /// against c: a full form is not taken for its first term.

@@ -19,8 +19,8 @@ internal static class ErrorText
         ? (error * 100).ToString(error >= 1 ? "0" : error >= 0.1 ? "0.#" : "0.##", CultureInfo.InvariantCulture) + " %"
         : Number(error);
 
-    // Two significant digits, in the shortest of the usual spellings.
-    private static string Number(double value)
+    /// <summary>A number with few digits, in the shorter of the usual spellings.</summary>
+    internal static string Number(double value)
         => value is >= 1e-3 and < 1e4
             ? double.Parse(value.ToString("G3", CultureInfo.InvariantCulture), CultureInfo.InvariantCulture).ToString("0.######", CultureInfo.InvariantCulture)
             : value.ToString("0.#e-0", CultureInfo.InvariantCulture);

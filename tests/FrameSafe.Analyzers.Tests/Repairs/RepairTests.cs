@@ -263,6 +263,73 @@ public sealed class RepairTests
             """);
 
     [Fact]
+    public Task Flawed_and_lossy_forms_become_the_known_ones()
+        => Mended.ByAsync<WriteKnownForm>(
+            """
+                [Unit("m/s")] private const double C = 299792458.0;
+
+                static double Gamma([Unit("m/s"), InFrame<Harbour>] double v) => {|FRAME302:1 / Math.Sqrt(1 - v * v / C)|}; // of the tug
+
+                static double Excess([Unit("m/s"), InFrame<Harbour>, MaxSpeed(0.01)] double v) => {|FRAME501:C / Math.Sqrt(C * C - v * v) - 1|};
+            """,
+            """
+                [Unit("m/s")] private const double C = 299792458.0;
+
+                static double Gamma([Unit("m/s"), InFrame<Harbour>] double v) => 1 / Math.Sqrt((1 - v / C) * (1 + v / C)); // of the tug
+
+                static double Excess([Unit("m/s"), InFrame<Harbour>, MaxSpeed(0.01)] double v) => v / C * (v / C) / (Math.Sqrt((1 - v / C) * (1 + v / C)) * (1 + Math.Sqrt((1 - v / C) * (1 + v / C))));
+            """);
+
+    [Fact]
+    public Task A_rounded_constant_becomes_exact_in_its_own_unit()
+        => Mended.ByAsync<WriteExactConstant>(
+            """
+                [Unit("m/s")] private const double C = {|FRAME502:3e8|}; // of light
+                [Unit("km/s")] private const double Kilometres = {|FRAME502:299800.0|};
+            """,
+            """
+                [Unit("m/s")] private const double C = 299792458.0; // of light
+                [Unit("km/s")] private const double Kilometres = 299792.458;
+            """);
+
+    [Fact]
+    public Task A_quantity_is_expressed_in_the_other_frame_by_the_boost_in_scope()
+        => Mended.ByAsync<CarryQuantity>(
+            """
+                static SeparationRate<Harbour> Direct(Velocity<Harbour> tug, Velocity<Tug> drone, Boost<Tug, Harbour> boost)
+                    => {|CS0019:tug - drone|}; // closing
+
+                static SeparationRate<Harbour> Inverse(Velocity<Harbour> tug, Velocity<Tug> drone, Boost<Harbour, Tug> boost)
+                    => {|CS0019:tug - drone|};
+
+                static void Passed(Velocity<Tug> drone, Boost<Tug, Harbour> boost) => Take({|CS1503:drone|});
+
+                static Velocity<Harbour> Returned(Velocity<Tug> drone, Boost<Tug, Harbour> boost) => {|CS0029:drone|};
+
+                static void Take(Velocity<Harbour> velocity) { }
+            """,
+            """
+                static SeparationRate<Harbour> Direct(Velocity<Harbour> tug, Velocity<Tug> drone, Boost<Tug, Harbour> boost)
+                    => tug - boost.Map(drone); // closing
+
+                static SeparationRate<Harbour> Inverse(Velocity<Harbour> tug, Velocity<Tug> drone, Boost<Harbour, Tug> boost)
+                    => tug - boost.Inverse.Map(drone);
+
+                static void Passed(Velocity<Tug> drone, Boost<Tug, Harbour> boost) => Take(boost.Map(drone));
+
+                static Velocity<Harbour> Returned(Velocity<Tug> drone, Boost<Tug, Harbour> boost) => boost.Map(drone);
+
+                static void Take(Velocity<Harbour> velocity) { }
+            """);
+
+    [Fact]
+    public Task Without_a_boost_nothing_is_expressed()
+        => Mended.NotByAsync<CarryQuantity>(
+            """
+                static SeparationRate<Harbour> None(Velocity<Harbour> tug, Velocity<Tug> drone) => {|CS0019:tug - drone|};
+            """);
+
+    [Fact]
     public Task A_unit_text_is_replaced_by_the_nearest_one()
         => Mended.ByAsync<CorrectUnitText>(
             """
