@@ -11,7 +11,10 @@ internal static class SurveyCommand
     {
         Argument<string> path = Running.PathArgument();
         Option<bool> quiet = Running.QuietOption();
-        var report = new Option<string?>("--report", "-r") { Description = "Write the findings to a file: .sarif (SARIF 2.1.0)." };
+        var report = new Option<string[]>("--report", "-r")
+        {
+            Description = "Write the findings to a file: .sarif (SARIF 2.1.0) or .html (for people). May be given for both.",
+        };
         var command = new Command(
             "survey",
             """
@@ -21,19 +24,20 @@ internal static class SurveyCommand
 
             Examples:
               framesafe survey src/Orbits.csproj
-              framesafe survey Mission.sln --report findings.sarif
+              framesafe survey Mission.sln --report findings.sarif --report findings.html
             """)
         { path, report, quiet };
         command.SetAction((parsed, cancellation) => Running.RunAsync(async () =>
         {
-            string? file = parsed.GetValue(report);
-            CheckReport(file);
+            string[] files = parsed.GetValue(report) ?? [];
+            foreach (string file in files)
+                CheckReport(file);
             Survey survey = await Running.WithSolutionAsync(
                 parsed.GetValue(path)!, (loaded, tell) => Surveyor.RunAsync(loaded, tell, cancellation), cancellation);
             Running.Screen(parsed.GetValue(quiet)).Show(survey);
-            if (file is not null)
+            foreach (string file in files)
             {
-                FileReport.Write(file, SarifReport.Of(survey));
+                FileReport.Write(file, Path.GetExtension(file) == ".html" ? HtmlReport.Of(survey) : SarifReport.Of(survey));
                 Console.WriteLine($"Report: {file}");
             }
 
@@ -44,12 +48,10 @@ internal static class SurveyCommand
         return command;
     }
 
-    private static void CheckReport(string? file)
+    private static void CheckReport(string file)
     {
-        if (file is null)
-            return;
-        if (Path.GetExtension(file) != ".sarif")
-            throw new BadInputException($"{file}: what kind of report that is cannot be told; the name ends in .sarif.");
+        if (Path.GetExtension(file) is not (".sarif" or ".html"))
+            throw new BadInputException($"{file}: what kind of report that is cannot be told; the name ends in .sarif or .html.");
         FileReport.CheckWritable(file);
     }
 }

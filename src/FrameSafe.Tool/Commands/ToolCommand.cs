@@ -10,6 +10,7 @@ internal static class ToolCommand
         SurveyCommand.Create(),
         MendCommand.Create(),
         GateCommand.Create(),
+        ChartCommand.Create(),
         ExplainCommand.Create(),
     };
 }

@@ -21,11 +21,13 @@ internal static class Surveyor
         var errors = new SortedDictionary<string, string>(StringComparer.Ordinal);
         int lines = 0;
         int done = 0;
+        var compilations = new List<Compilation>();
         foreach (Project project in loaded.Projects)
         {
             tell($"surveying {project.Name} ({++done} of {loaded.Projects.Count})");
             Compilation compilation = await project.GetCompilationAsync(cancellation)
                 ?? throw new BadInputException($"{project.FilePath}: the project has no compilation.");
+            compilations.Add(compilation);
             Diagnostic[] broken = [.. compilation.GetDiagnostics(cancellation).Where(diagnostic => diagnostic.Severity == DiagnosticSeverity.Error)];
             if (broken.Length > 0)
                 errors[project.Name] = Describe(broken, loaded.Root);
@@ -46,7 +48,7 @@ internal static class Surveyor
                 .ThenBy(finding => finding.Place.Column)
                 .ThenBy(finding => finding.Rule, StringComparer.Ordinal),
         ];
-        return new(loaded.Root, ordered, coverage, errors, lines);
+        return new(loaded.Root, ordered, coverage, errors, lines, FrameChart.Of(compilations, cancellation));
     }
 
     /// <summary>The findings of one project that its own settings let through.</summary>

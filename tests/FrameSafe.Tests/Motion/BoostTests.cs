@@ -38,7 +38,7 @@ public sealed class BoostTests
             Velocity<Harbour> back = boost.Inverse.Map(boost.Map(velocity));
 
             // The way through the other frame loses what its own rounding is, seen from here: γ of both.
-            double bound = 1e-15 * boost.LorentzFactor.Value * boost.LorentzFactor.Value * velocity.LorentzFactor * velocity.LorentzFactor;
+            double bound = 1e-14 * boost.LorentzFactor.Value * boost.LorentzFactor.Value * velocity.LorentzFactor * velocity.LorentzFactor;
             Assert.Equal(velocity.XCelerityRatio, back.XCelerityRatio, bound);
             Assert.Equal(velocity.YCelerityRatio, back.YCelerityRatio, bound);
             Assert.Equal(velocity.ZCelerityRatio, back.ZCelerityRatio, bound);
@@ -46,12 +46,10 @@ public sealed class BoostTests
 
     [Fact]
     public void Relative_speed_is_the_same_from_either_side()
-        => Gen.Select(Celerities, Celerities).Sample((a, b) =>
+        => Gen.Select(Moderate, Moderate).Sample((a, b) =>
         {
             Velocity<Harbour> one = Velocity<Harbour>.FromCelerityRatio(a.X, a.Y, a.Z);
             Velocity<Harbour> other = Velocity<Harbour>.FromCelerityRatio(b.X, b.Y, b.Z);
-            if (one.LorentzFactor * other.LorentzFactor > 1e140)
-                return;
             double there = Boost<Harbour, Tug>.Into(one).Map(other).LorentzFactor;
             double back = Boost<Harbour, Drone>.Into(other).Map(one).LorentzFactor;
             Assert.Equal(1, there / back, 1e-9);
