@@ -30,12 +30,18 @@ internal sealed class Value
 
     internal ImmutableArray<Value> Parts { get; }
 
+    /// <summary>The Lorentz factor of which this number is the reciprocal, √(1 − v²/c²); null for any other number.</summary>
+    internal Tag? ReciprocalOf { get; private set; }
+
     internal static Value Of(Tag tag, Origin? origin = null) => new(tag, origin, []);
 
     internal static Value Of(Declaration? declaration)
         => declaration is null ? Unknown : new(declaration.Tag, declaration.Origin, []);
 
     internal static Value Tuple(ImmutableArray<Value> parts) => new(Tag.Unknown, null, parts);
+
+    internal static Value Reciprocal(Tag lorentzFactor, Origin? origin)
+        => new(Number.Tag, origin, []) { ReciprocalOf = lorentzFactor };
 
     internal Value With(Tag tag) => tag.Equals(Tag) && tag.UnitText == Tag.UnitText ? this : new(tag, Origin, []);
 
@@ -60,7 +66,7 @@ internal sealed class Value
     {
         if (ReferenceEquals(this, other))
             return true;
-        if (!Tag.Equals(other.Tag) || Parts.Length != other.Parts.Length)
+        if (!Tag.Equals(other.Tag) || !Equals(ReciprocalOf, other.ReciprocalOf) || Parts.Length != other.Parts.Length)
             return false;
         for (int i = 0; i < Parts.Length; i++)
         {

@@ -239,6 +239,8 @@ internal sealed partial class Walk
                 return Value.Number;
             case KnownFunction.OfNumber:
                 Argument(call, first, isAngle: false);
+                if (first.Tag.Misuse is Misuse.CoordinateOverProperTime or Misuse.ProperOverCoordinateTime && call.TargetMethod.Name.StartsWith("Exp", System.StringComparison.Ordinal))
+                    NoteDecay(ArgumentAt(call, 0));
                 return Value.Number;
             case KnownFunction.Logarithm:
                 if (!IsLogarithmOfRatio(call))
@@ -253,6 +255,37 @@ internal sealed partial class Walk
                 return Value.Of(TagProducts.Product(first.Tag, Tag.Plain with { Conversion = Scale.Of(180, 1) / Scale.Pi }), first.Origin);
             default:
                 return Value.Unknown;
+        }
+    }
+
+    // A decay law counts the proper time of what decays: exp(-t/τ) of a coordinate time by a proper lifetime lacks the Lorentz factor.
+    private void NoteDecay(IOperation exponent)
+    {
+        while (exponent is IUnaryOperation or IParenthesizedOperation or IConversionOperation)
+        {
+            exponent = exponent switch
+            {
+                IUnaryOperation unary => unary.Operand,
+                IParenthesizedOperation parenthesized => parenthesized.Operand,
+                IConversionOperation conversion => conversion.Operand,
+                _ => exponent,
+            };
+        }
+
+        if (exponent is not IBinaryOperation { OperatorKind: BinaryOperatorKind.Divide } quotient)
+            return;
+        IOperation numerator = quotient.LeftOperand;
+        while (numerator is IUnaryOperation { OperatorKind: UnaryOperatorKind.Minus } negated)
+            numerator = negated.Operand;
+        (Value time, Value lifetime) = (Quietly(numerator), Quietly(quotient.RightOperand));
+        if (TagAlgebra.Meet(time.Tag, lifetime.Tag, Meeting.Comparison).Clash is { Kind: ClashKind.ProperAndCoordinateTime } clash)
+        {
+            Note(
+                quotient.Syntax,
+                clash,
+                new(time, numerator.Syntax, Operation: numerator),
+                new(lifetime, quotient.RightOperand.Syntax, Operation: quotient.RightOperand),
+                "divided in a decay law");
         }
     }
 

@@ -355,7 +355,13 @@ internal sealed partial class Walk
             case BinaryOperatorKind.Subtract:
                 return Meet(Meeting.Difference, "subtracted");
             case BinaryOperatorKind.Multiply:
-                return Value.Of(TagProducts.Product(left.Tag, right.Tag), OriginOf(left, right));
+                return Value.Of(
+                    right.ReciprocalOf is { } over ? TagProducts.Quotient(left.Tag, over)
+                    : left.ReciprocalOf is { } under ? TagProducts.Quotient(right.Tag, under)
+                    : TagProducts.Product(left.Tag, right.Tag),
+                    OriginOf(left, right));
+            case BinaryOperatorKind.Divide when right.ReciprocalOf is { } factor:
+                return Value.Of(TagProducts.Product(left.Tag, factor), OriginOf(left, right));
             case BinaryOperatorKind.Divide:
                 // A quotient of integers is cut off, which no unit survives that the code does not name.
                 return Value.Of(TagProducts.Quotient(left.Tag, right.Tag), OriginOf(left, right));

@@ -29,7 +29,16 @@ internal sealed partial class Walk
 
     /// <summary>What is known of a call that completes a formula: γ spelled with a power, 1/γ with a root.</summary>
     private Value Recognise(IInvocationOperation call, Value value)
-        => value.Tag.Dimension is { IsOne: true } ? Lorentz(call) ?? value : value;
+        => value.Tag.Dimension is { IsOne: true } ? Lorentz(call) ?? ReciprocalLorentz(call) ?? value : value;
+
+    private Value? ReciprocalLorentz(IInvocationOperation call)
+    {
+        Value[]? velocities = Velocities(call, out ReadFormula? read);
+        return velocities is { Length: > 0 } && ScaleOfLight(velocities[0].Tag) is { } light
+            && KnownForms.IsReciprocalLorentzFactor(read!.Formula, velocities.Length, light)
+            ? Value.Reciprocal(Tag.Declared(Unit.One, kind: QuantityKind.LorentzFactor), velocities[0].Origin)
+            : null;
+    }
 
     // (u ± v)/(1 ± uv/c²) is the composition of the two velocities, written by hand: its sum is no mistake.
     private Value? Composition(IBinaryOperation operation)

@@ -26,6 +26,10 @@ internal static class KnownForms
     internal static bool IsLorentzFactor(Formula formula, int components, double lightSpeed)
         => Agrees(formula, components, lightSpeed, static values => 1 / Math.Sqrt(1 - SumOfSquares(values, -1)), 1);
 
+    /// <summary>Whether a formula of one velocity, or of its components, is 1/γ, √(1 − v²/c²).</summary>
+    internal static bool IsReciprocalLorentzFactor(Formula formula, int components, double lightSpeed)
+        => Agrees(formula, components, lightSpeed, static values => Math.Sqrt(1 - SumOfSquares(values, -1)), 1);
+
     /// <summary>Whether a formula of one velocity, or of its components, is γ − 1.</summary>
     internal static bool IsLorentzFactorMinusOne(Formula formula, int components, double lightSpeed)
         => Agrees(formula, components, lightSpeed, static values => (1 / Math.Sqrt(1 - SumOfSquares(values, -1))) - 1, 1);

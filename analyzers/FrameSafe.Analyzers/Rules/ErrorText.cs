@@ -9,10 +9,13 @@ internal static class ErrorText
     internal static string WrongBy(double error, string speeds, double budget)
         => "wrong by up to " + Size(error) + " (" + speeds + "; budget " + Number(budget) + ")";
 
-    internal static string SpeedsUpTo(double most) => "speeds up to " + Number(most) + " c";
+    internal static string SpeedsUpTo(double most) => "speeds up to " + Speed(most) + " c";
 
     internal static string Speeds(double one, double other)
-        => one == other ? SpeedsUpTo(one) : "speeds up to " + Number(one) + " c and " + Number(other) + " c";
+        => one == other ? SpeedsUpTo(one) : "speeds up to " + Speed(one) + " c and " + Speed(other) + " c";
+
+    // What distinguishes large speeds is how little they lack.
+    private static string Speed(double speed) => speed > 0.99 ? speed.ToString("R", CultureInfo.InvariantCulture) : Number(speed);
 
     /// <summary>A relative error: in per cent from a thousandth on, else as a power of ten; two digits.</summary>
     internal static string Size(double error) => error >= 1e-3

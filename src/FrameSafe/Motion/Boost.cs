@@ -15,7 +15,14 @@ public readonly struct Boost<TFrom, TTo> : IEquatable<Boost<TFrom, TTo>>
 {
     private readonly Triple _ratio;
 
-    private Boost(Triple ratio) => _ratio = ratio;
+    // γ − 1 of γ as a double, which gives γ back exactly; so that the default is no motion.
+    private readonly double _lorentzMinusOne;
+
+    private Boost(Triple ratio)
+    {
+        _ratio = ratio;
+        _lorentzMinusOne = Celerity.LorentzFactor(ratio.Norm) - 1;
+    }
 
     /// <summary>The velocity of the second frame in the first.</summary>
     public Velocity<TFrom> Velocity => new(_ratio);
@@ -60,7 +67,7 @@ public readonly struct Boost<TFrom, TTo> : IEquatable<Boost<TFrom, TTo>>
     /// <summary>The same field in the other frame; electric and magnetic go together.</summary>
     public ElectromagneticField<TTo> Map(ElectromagneticField<TFrom> field)
     {
-        double lorentz = Celerity.LorentzFactor(_ratio.Norm);
+        double lorentz = 1 + _lorentzMinusOne;
         Triple electric = field.Electric;
         Triple magnetic = field.Magnetic * PhysicsOfLight.Speed;
         Triple carriedElectric = ((electric * lorentz) + _ratio.Cross(magnetic)).Plus(_ratio, -_ratio.Dot(electric) / (1 + lorentz));
@@ -106,7 +113,7 @@ public readonly struct Boost<TFrom, TTo> : IEquatable<Boost<TFrom, TTo>>
     public override string ToString() => typeof(TFrom).Name + " to " + typeof(TTo).Name + ", which moves with " + Velocity;
 
     /// <summary>A four-vector of which time and space are in one unit.</summary>
-    internal (double Time, Triple Space) Turn(double time, Triple space, int sign) => BoostKernel.Apply(_ratio, time, space, sign);
+    internal (double Time, Triple Space) Turn(double time, Triple space, int sign) => BoostKernel.Apply(_ratio, 1 + _lorentzMinusOne, time, space, sign);
 
     private static bool Collinear(Triple one, Triple other) => one is { Y: 0, Z: 0 } && other is { Y: 0, Z: 0 };
 

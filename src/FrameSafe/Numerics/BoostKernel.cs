@@ -8,8 +8,11 @@ internal static class BoostKernel
     /// sum are kept exact until they meet, for near a worldline they nearly cancel.
     /// </summary>
     internal static (double Time, Triple Space) Apply(Triple ratio, double time, Triple space, int sign)
+        => Apply(ratio, Celerity.LorentzFactor(ratio.Norm), time, space, sign);
+
+    /// <summary>The same, where γ is known already.</summary>
+    internal static (double Time, Triple Space) Apply(Triple ratio, double lorentz, double time, Triple space, int sign)
     {
-        double lorentz = Celerity.LorentzFactor(ratio.Norm);
         double along = ratio.Dot(space);
         double carried = Math.FusedMultiplyAdd(lorentz, time, sign * along);
         double factor = (along / (1 + lorentz)) + (sign * time);
