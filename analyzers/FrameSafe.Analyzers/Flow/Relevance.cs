@@ -9,33 +9,22 @@ internal static class Relevance
 {
     internal static bool Concerns(IOperation body, ISymbol owner, SymbolTags tags)
     {
-        if (body is IFieldInitializerOperation or IPropertyInitializerOperation or IParameterInitializerOperation)
-            return true;
-        if (owner is IMethodSymbol method && (tags.OfReturn(method) is not null || AnyTagged(method, tags)))
+        if (tags.Concerns(owner is IMethodSymbol { AssociatedSymbol: { } member } ? member : owner))
             return true;
         foreach (IOperation operation in body.DescendantsAndSelf())
         {
             switch (operation)
             {
-                case IFieldReferenceOperation field when tags.Of(field.Field) is not null:
-                case IPropertyReferenceOperation property when tags.Of(property.Property) is not null:
+                case IFieldReferenceOperation field when tags.Concerns(field.Field):
+                case IPropertyReferenceOperation property when tags.Concerns(property.Property):
                 case IParameterReferenceOperation parameter when tags.Of(parameter.Parameter) is not null:
-                case IInvocationOperation call when tags.OfReturn(call.TargetMethod) is not null || AnyTagged(call.TargetMethod, tags):
+                case IInvocationOperation call when tags.Concerns(call.TargetMethod):
+                case IObjectCreationOperation { Constructor: { } constructor } when tags.Concerns(constructor):
                 case IVariableDeclaratorOperation declarator when tags.OfLocal(declarator.Symbol) is not null:
-                case IObjectCreationOperation { Constructor: { } constructor } when AnyTagged(constructor, tags):
+                case ILocalFunctionOperation local when tags.Concerns(local.Symbol):
+                case IAnonymousFunctionOperation function when tags.Concerns(function.Symbol):
                     return true;
             }
-        }
-
-        return false;
-    }
-
-    private static bool AnyTagged(IMethodSymbol method, SymbolTags tags)
-    {
-        foreach (IParameterSymbol parameter in method.Parameters)
-        {
-            if (tags.Of(parameter) is not null)
-                return true;
         }
 
         return false;

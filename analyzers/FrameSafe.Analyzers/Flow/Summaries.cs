@@ -1,3 +1,4 @@
+using System;
 using System.Collections.Concurrent;
 using System.Collections.Immutable;
 using System.Text;
@@ -22,6 +23,8 @@ internal sealed class Summaries
 
     private readonly Knowledge _knowledge;
     private readonly ConcurrentDictionary<(ISymbol Member, int Depth, string Arguments), Value> _results = new();
+    private readonly ConcurrentDictionary<IMethodSymbol, Lazy<IOperation?>> _bodies = new(SymbolEqualityComparer.Default);
+    private readonly ConcurrentDictionary<SyntaxTree, SemanticModel> _models = new();
 
     internal Summaries(Knowledge knowledge) => _knowledge = knowledge;
 
@@ -65,24 +68,8 @@ internal sealed class Summaries
     private Value Compute(
         IMethodSymbol method, ImmutableArray<IArgumentOperation> arguments, Value[] values, int depth, CancellationToken cancellation)
     {
-        SyntaxNode syntax = method.DeclaringSyntaxReferences[0].GetSyntax(cancellation);
-        SyntaxNode? body = syntax switch
-        {
-            BaseMethodDeclarationSyntax declaration => (SyntaxNode?)declaration.ExpressionBody ?? declaration.Body,
-            AccessorDeclarationSyntax accessor => (SyntaxNode?)accessor.ExpressionBody ?? accessor.Body,
-            ArrowExpressionClauseSyntax arrow => arrow,
-            LocalFunctionStatementSyntax local => (SyntaxNode?)local.ExpressionBody ?? local.Body,
-            PropertyDeclarationSyntax property => property.ExpressionBody,
-            _ => null,
-        };
-        if (body is null || body.Span.Length > MaxBodyLength)
-            return Value.Unknown;
-
-        // The one place that asks for a model: bodies of other members are not handed to an operation action.
-#pragma warning disable RS1030
-        SemanticModel model = _knowledge.Compilation.GetSemanticModel(body.SyntaxTree);
-#pragma warning restore RS1030
-        if (model.GetOperation(body, cancellation) is not { } operation)
+        IMethodSymbol definition = method.OriginalDefinition;
+        if (_bodies.GetOrAdd(definition, known => new Lazy<IOperation?>(() => Body(known))).Value is not { } operation)
             return Value.Unknown;
 
         var walk = new Walk(_knowledge, method, cancellation, depth + 1);
@@ -99,6 +86,28 @@ internal sealed class Summaries
 
         walk.Run(operation);
         return walk.Result;
+    }
+
+    private IOperation? Body(IMethodSymbol method)
+    {
+        SyntaxNode syntax = method.DeclaringSyntaxReferences[0].GetSyntax();
+        SyntaxNode? body = syntax switch
+        {
+            BaseMethodDeclarationSyntax declaration => (SyntaxNode?)declaration.ExpressionBody ?? declaration.Body,
+            AccessorDeclarationSyntax accessor => (SyntaxNode?)accessor.ExpressionBody ?? accessor.Body,
+            ArrowExpressionClauseSyntax arrow => arrow,
+            LocalFunctionStatementSyntax local => (SyntaxNode?)local.ExpressionBody ?? local.Body,
+            PropertyDeclarationSyntax property => property.ExpressionBody,
+            _ => null,
+        };
+        if (body is null || body.Span.Length > MaxBodyLength)
+            return null;
+
+        // The one place that asks for a model: bodies of other members are not handed to an operation action.
+#pragma warning disable RS1030
+        SemanticModel model = _models.GetOrAdd(body.SyntaxTree, tree => _knowledge.Compilation.GetSemanticModel(tree));
+#pragma warning restore RS1030
+        return model.GetOperation(body);
     }
 
     private static string Key(ImmutableArray<IArgumentOperation> arguments, Value[] values)

@@ -18,6 +18,7 @@ internal sealed class SymbolTags
     private readonly ConcurrentDictionary<ISymbol, Declaration> _declarations = new(SymbolEqualityComparer.Default);
     private readonly ConcurrentDictionary<IMethodSymbol, Declaration> _returns = new(SymbolEqualityComparer.Default);
     private readonly ConcurrentDictionary<IAssemblySymbol, bool> _tagged = new(SymbolEqualityComparer.Default);
+    private readonly ConcurrentDictionary<ISymbol, bool> _concerned = new(SymbolEqualityComparer.Default);
     private readonly IAssemblySymbol _assembly;
     private readonly NameSuffixes _suffixes;
 
@@ -39,7 +40,29 @@ internal sealed class SymbolTags
 
     /// <summary>Whether anything that is declared in an assembly can carry a tag.</summary>
     internal bool MayCarryTags(IAssemblySymbol? assembly)
-        => assembly is not null && (SymbolEqualityComparer.Default.Equals(assembly, _assembly) || _tagged.GetOrAdd(assembly, ReferencesAnnotations));
+        => assembly is not null && (ReferenceEquals(assembly, _assembly) || _tagged.GetOrAdd(assembly, ReferencesAnnotations));
+
+    /// <summary>Whether a member has anything to do with tags: itself, its result or one of its parameters; one look-up for all.</summary>
+    internal bool Concerns(ISymbol member) => _concerned.GetOrAdd(member.OriginalDefinition, FindConcern);
+
+    private bool FindConcern(ISymbol member)
+    {
+        if (Of(member) is not null)
+            return true;
+        ImmutableArray<IParameterSymbol> parameters = member switch
+        {
+            IMethodSymbol method => method.Parameters,
+            IPropertySymbol property => property.Parameters,
+            _ => [],
+        };
+        foreach (IParameterSymbol parameter in parameters)
+        {
+            if (Of(parameter) is not null)
+                return true;
+        }
+
+        return member is IMethodSymbol returning && OfReturn(returning) is not null;
+    }
 
     /// <summary>The declared tag of a parameter, field or property; null where nothing is declared.</summary>
     internal Declaration? Of(ISymbol symbol)

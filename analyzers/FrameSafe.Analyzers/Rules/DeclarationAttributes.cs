@@ -1,3 +1,4 @@
+using System.Collections.Concurrent;
 using System.Collections.Generic;
 using System.Globalization;
 using System.Threading;
@@ -13,6 +14,10 @@ namespace FrameSafe.Analyzers.Rules;
 /// <summary>Judges the attributes themselves where they stand: unit texts, largest speeds, frames declared relative to others.</summary>
 internal static class DeclarationAttributes
 {
+    private const int MostKept = 500;
+
+    private static readonly ConcurrentDictionary<string, bool> Readable = new(System.StringComparer.Ordinal);
+
     /// <summary>By the name alone, before anything is bound.</summary>
     internal static bool IsNamedLikeOurs(AttributeSyntax attribute) => Name(attribute.Name) is
         "Unit" or "UnitAttribute" or "MaxSpeed" or "MaxSpeedAttribute" or "RelativeTo" or "RelativeToAttribute"
@@ -20,6 +25,8 @@ internal static class DeclarationAttributes
 
     internal static IEnumerable<Finding> Judge(AttributeSyntax attribute, SemanticModel model, CancellationToken cancellation)
     {
+        if (IsPlainlyRight(attribute))
+            yield break;
         if (attribute.ArgumentList is null && Name(attribute.Name) is not ("RelativeTo" or "RelativeToAttribute"))
             yield break;
         if (model.GetSymbolInfo(attribute, cancellation).Symbol?.ContainingType is not { } type || !Vocabulary.IsOurs(type))
@@ -69,6 +76,27 @@ internal static class DeclarationAttributes
                 ? RuleTable.ImpossibleFrame.JudgeSpeed(
                     System.Convert.ToDouble(value, CultureInfo.InvariantCulture), owner, argument.GetLocation())
                 : null;
+    }
+
+    // Nearly all attributes are literals that can be read: there is nothing to bind then, and binding is what costs.
+    private static bool IsPlainlyRight(AttributeSyntax attribute)
+        => attribute.ArgumentList is { Arguments: { Count: 1 } arguments } && arguments[0].Expression is LiteralExpressionSyntax literal
+            && literal.Token.Value switch
+            {
+                string text => Name(attribute.Name) is "Unit" or "UnitAttribute" && IsReadable(text),
+                double speed => Name(attribute.Name) is "MaxSpeed" or "MaxSpeedAttribute" && speed is >= 0 and < 1,
+                _ => false,
+            };
+
+    private static bool IsReadable(string text)
+    {
+        if (Readable.TryGetValue(text, out bool known))
+            return known;
+        bool readable = UnitText.TryRead(text, out _, out _);
+        // A handful of units serves a project; whatever else is typed is not kept.
+        if (Readable.Count < MostKept)
+            Readable.TryAdd(text, readable);
+        return readable;
     }
 
     private static Finding? Parent(AttributeSyntax attribute, INamedTypeSymbol frame, CancellationToken cancellation)
