@@ -40,6 +40,11 @@ internal sealed class Value
 
     internal static Value Tuple(ImmutableArray<Value> parts) => new(Tag.Unknown, null, parts);
 
+    /// <summary>The parts of an array that holds several quantities; null for any other value.</summary>
+    internal SlotMap? Slots { get; private set; }
+
+    internal Value WithSlots(SlotMap? slots) => slots is null ? this : new(Tag, Origin, Parts) { Slots = slots };
+
     internal static Value Reciprocal(Tag lorentzFactor, Origin? origin)
         => new(Number.Tag, origin, []) { ReciprocalOf = lorentzFactor };
 
@@ -58,6 +63,8 @@ internal sealed class Value
             return Tuple(parts.MoveToImmutable());
         }
 
+        if (left.Slots is not null && ReferenceEquals(left.Slots, right.Slots))
+            return left;
         return new(TagAlgebra.Merge(left.Tag, right.Tag), left.Tag.IsNeutral ? right.Origin : left.Origin ?? right.Origin, []);
     }
 
@@ -66,7 +73,7 @@ internal sealed class Value
     {
         if (ReferenceEquals(this, other))
             return true;
-        if (!Tag.Equals(other.Tag) || !Equals(ReciprocalOf, other.ReciprocalOf) || Parts.Length != other.Parts.Length)
+        if (!Tag.Equals(other.Tag) || !Equals(ReciprocalOf, other.ReciprocalOf) || Parts.Length != other.Parts.Length || !ReferenceEquals(Slots, other.Slots))
             return false;
         for (int i = 0; i < Parts.Length; i++)
         {

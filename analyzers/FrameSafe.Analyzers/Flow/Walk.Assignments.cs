@@ -165,11 +165,11 @@ internal sealed partial class Walk
             case IFieldReferenceOperation field:
                 return Deliver(value, source, Tags.Of(field.Field), "field `" + field.Field.Name + "`", verb);
             case IPropertyReferenceOperation { Property.IsIndexer: true } indexer when Tags.Of(indexer.Property) is null:
-                return AssignElement(indexer.Instance, value, source, verb);
+                return AssignElement(indexer.Instance, indexer.Arguments.Length == 1 ? indexer.Arguments[0].Value : null, value, source, verb);
             case IPropertyReferenceOperation property:
                 return Deliver(value, source, Tags.Of(property.Property), "property `" + property.Property.Name + "`", verb);
             case IArrayElementReferenceOperation element:
-                return AssignElement(element.ArrayReference, value, source, verb);
+                return AssignElement(element.ArrayReference, element.Indices.Length == 1 ? element.Indices[0] : null, value, source, verb);
             case IDeclarationExpressionOperation { Expression: ILocalReferenceOperation declared }:
                 _environment.Set(declared.Local, value);
                 return value;
@@ -184,8 +184,15 @@ internal sealed partial class Walk
     }
 
     // An element takes the tag that its collection declares; a collection that declares none gets to know its elements.
-    private Value AssignElement(IOperation? collection, Value value, IOperation? source, string verb)
+    private Value AssignElement(IOperation? collection, IOperation? index, Value value, IOperation? source, string verb)
     {
+        if (collection is not null && index is not null && Quietly(collection).Slots is { } slots)
+        {
+            return ElementOf(slots, index) is { } part
+                ? Deliver(value, source, part, "`" + part.Origin.Name + "`", verb)
+                : value;
+        }
+
         switch (collection)
         {
             case IParameterReferenceOperation parameter when Tags.Of(parameter.Parameter) is { } declared:

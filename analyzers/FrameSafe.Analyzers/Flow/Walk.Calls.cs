@@ -26,7 +26,11 @@ internal sealed partial class Walk
         if (method.Name is "FromResult" or "GetEnumerator" or "AsSpan" or "AsMemory" or "Slice" or "Clone" or "ToArray" or "ConfigureAwait" or "GetValueOrDefault"
             or "AsReadOnly" or "GetAwaiter" or "GetResult")
         {
-            return operation.Instance is null && arguments.Length > 0 ? arguments[0] : instance;
+            bool isExtension = operation.Instance is null && arguments.Length > 0;
+            IOperation? start = method.Name is "AsSpan" or "AsMemory" or "Slice" && operation.Arguments.Length > (isExtension ? 1 : 0)
+                ? operation.Arguments[isExtension ? 1 : 0].Value
+                : null;
+            return Sliced(isExtension ? arguments[0] : instance, start);
         }
 
         if (method.Name is "Add" or "Push" or "Enqueue" or "Insert" && operation.Instance is ILocalReferenceOperation list && arguments.Length > 0)

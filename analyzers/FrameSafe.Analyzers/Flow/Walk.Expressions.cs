@@ -19,7 +19,7 @@ internal sealed partial class Walk
     public override Value VisitParameterReference(IParameterReferenceOperation operation, object? argument)
         => Tags.Of(operation.Parameter) is { } declared
             ? _environment[operation.Parameter] is { } narrowed && !IsUnstable(operation.Parameter) ? narrowed : Value.Of(declared)
-            : Variable(operation.Parameter);
+            : Variable(operation.Parameter).WithSlots(Tags.SlotsOf(operation.Parameter));
 
     public override Value VisitLocalReference(ILocalReferenceOperation operation, object? argument)
         => operation.Local is { HasConstantValue: true, ConstantValue: var constant } && _environment[operation.Local] is null
@@ -35,7 +35,7 @@ internal sealed partial class Walk
             return instance;
         return KnownMembers.Constant(operation.Field) is { } known ? Value.Of(known)
             : operation.Field.HasConstantValue ? Constant(operation.Field.ConstantValue)
-            : TupleElement(operation);
+            : TupleElement(operation).WithSlots(Tags.SlotsOf(operation.Field));
     }
 
     public override Value VisitPropertyReference(IPropertyReferenceOperation operation, object? argument)
@@ -44,6 +44,10 @@ internal sealed partial class Walk
         Arguments(operation.Arguments);
         if (Tags.Of(operation.Property) is { } declared)
             return Value.Of(declared);
+        if (Tags.SlotsOf(operation.Property) is { } own)
+            return Value.Unknown.WithSlots(own);
+        if (operation.Property.IsIndexer && instance.Slots is { } slots)
+            return operation.Arguments.Length == 1 ? Value.Of(ElementOf(slots, operation.Arguments[0].Value)) : Value.Unknown;
         if (operation.Property.IsIndexer || operation.Property.Name is "Value" or "Current" or "Span" or "Result")
             return instance.Parts.Length > 0 ? Value.Unknown : instance;
         if (operation.Property.Name is "X" or "Y" or "Z" or "W" && KnownMembers.IsVector(operation.Property.ContainingType))
@@ -56,14 +60,18 @@ internal sealed partial class Walk
         Value array = Visit(operation.ArrayReference);
         foreach (IOperation index in operation.Indices)
             Visit(index);
-        return array;
+        if (array.Slots is not { } slots || operation.Indices.Length != 1)
+            return array;
+        return operation.Indices[0] is IRangeOperation range ? Sliced(array, range.LeftOperand) : Value.Of(ElementOf(slots, operation.Indices[0]));
     }
 
     public override Value VisitImplicitIndexerReference(IImplicitIndexerReferenceOperation operation, object? argument)
     {
         Value instance = Visit(operation.Instance);
         Visit(operation.Argument);
-        return instance;
+        return operation.Argument is IRangeOperation range ? Sliced(instance, range.LeftOperand)
+            : instance.Slots is not null ? Value.Unknown
+            : instance;
     }
 
     public override Value VisitInlineArrayAccess(IInlineArrayAccessOperation operation, object? argument)

@@ -18,6 +18,7 @@ internal sealed class SymbolTags
     private readonly ConcurrentDictionary<ISymbol, Declaration> _declarations = new(SymbolEqualityComparer.Default);
     private readonly ConcurrentDictionary<IMethodSymbol, Declaration> _returns = new(SymbolEqualityComparer.Default);
     private readonly ConcurrentDictionary<IAssemblySymbol, bool> _tagged = new(SymbolEqualityComparer.Default);
+    private readonly ConcurrentDictionary<ISymbol, Lazy<SlotMap?>> _slots = new(SymbolEqualityComparer.Default);
     private readonly ConcurrentDictionary<ISymbol, bool> _concerned = new(SymbolEqualityComparer.Default);
     private readonly IAssemblySymbol _assembly;
     private readonly NameSuffixes _suffixes;
@@ -47,7 +48,7 @@ internal sealed class SymbolTags
 
     private bool FindConcern(ISymbol member)
     {
-        if (Of(member) is not null)
+        if (Of(member) is not null || (member is IFieldSymbol or IPropertySymbol && SlotsOf(member) is not null))
             return true;
         ImmutableArray<IParameterSymbol> parameters = member switch
         {
@@ -57,7 +58,7 @@ internal sealed class SymbolTags
         };
         foreach (IParameterSymbol parameter in parameters)
         {
-            if (Of(parameter) is not null)
+            if (Of(parameter) is not null || SlotsOf(parameter) is not null)
                 return true;
         }
 
@@ -73,6 +74,15 @@ internal sealed class SymbolTags
             return _contracts(symbol);
         Declaration found = _declarations.GetOrAdd(symbol, Read);
         return ReferenceEquals(found, Nothing) ? _contracts(symbol) : found;
+    }
+
+    /// <summary>The parts that a parameter, field or property describes of its array; null where it describes none.</summary>
+    internal SlotMap? SlotsOf(ISymbol symbol)
+    {
+        if (!MayCarryTags(symbol.ContainingAssembly))
+            return null;
+        SlotMap? slots = _slots.GetOrAdd(symbol, static known => new Lazy<SlotMap?>(() => SlotMap.Of(known))).Value;
+        return slots;
     }
 
     /// <summary>What the name of a local says of it; null where no suffix is agreed on that it ends with.</summary>

@@ -38,7 +38,7 @@ internal static class DeclarationAttributes
                 finding = Unit(Argument(attribute, 0));
                 break;
             case "SlotAttribute":
-                finding = Unit(Argument(attribute, 1));
+                finding = Range(Argument(attribute, 0)) ?? Unit(Argument(attribute, 1));
                 break;
             case "TimeScaleAttribute":
                 finding = Unit(Named(attribute, "Unit"));
@@ -70,6 +70,12 @@ internal static class DeclarationAttributes
                 ? null
                 : RuleTable.UnreadableUnit.Judge(text, Place(argument, text, error));
         }
+
+        Finding? Range(ExpressionSyntax? argument)
+            => argument is not null && model.GetConstantValue(argument, cancellation) is { HasValue: true, Value: string text }
+                && !SlotMap.TryRange(text, out int _, out int _)
+                ? RuleTable.ImpossibleFrame.JudgeRange(text, argument.GetLocation())
+                : null;
 
         Finding? Speed(ExpressionSyntax? argument, string owner)
             => argument is not null && model.GetConstantValue(argument, cancellation) is { HasValue: true, Value: { } value and (double or int or float) }

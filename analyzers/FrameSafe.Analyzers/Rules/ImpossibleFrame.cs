@@ -57,6 +57,9 @@ internal sealed class ImpossibleFrame : Rule
             Location.None,
             "The setting " + Settings.ErrorBudget + " is `" + text + "`; a positive number is wanted, such as 1e-9 (which is used instead)");
 
+    internal Finding JudgeRange(string text, Location place)
+        => new(this, place, "The range `" + text + "` of a slot cannot be read; an index (`6`) or a range as C# writes it (`0..3`) is wanted");
+
     internal Finding JudgeSuffix(string setting, string value)
         => new(
             this,
