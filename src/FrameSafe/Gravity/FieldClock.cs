@@ -22,7 +22,7 @@ public readonly struct FieldClock<TClock> where TClock : struct, IClock
     private readonly double _factor;
     private readonly Extended _place;
 
-    private FieldClock(Extended squareMinusOne, Extended square, Extended horizon = default, double factor = 0, Extended place = default)
+    internal FieldClock(Extended squareMinusOne, Extended square, Extended horizon = default, double factor = 0, Extended place = default)
     {
         _squareMinusOne = squareMinusOne;
         _square = square;
@@ -58,6 +58,11 @@ public readonly struct FieldClock<TClock> where TClock : struct, IClock
         Extended reach = horizon * factor;
         return new(-(reach / place), (place - reach) / place, horizon, factor, place);
     }
+
+    /// <summary>The same clock under another name.</summary>
+    internal FieldClock<TOther> Renamed<TOther>()
+        where TOther : struct, IClock
+        => new FieldClock<TOther>(_squareMinusOne, _square, _horizon, _factor, _place);
 
     // a² − b²; in one field h(k₂r₁ − k₁r₂)/(r₁r₂), which is exactly zero where an orbit's clock keeps step with the ground's.
     private Extended Excess<TOther>(FieldClock<TOther> other)

@@ -89,6 +89,10 @@ public readonly struct Boost<TFrom, TTo> : IEquatable<Boost<TFrom, TTo>>
         return new(carried * (1 / carried.Norm));
     }
 
+    /// <summary>How much later the second of two events is than the first, in the other frame: 0 where they are simultaneous there.</summary>
+    /// <remarks>γ(Δt − v·Δr/c²) of their interval: nothing of their dates is lost in it.</remarks>
+    public CoordinateTime<TTo> DelayBetween(SpacetimeEvent<TFrom> first, SpacetimeEvent<TFrom> second) => Map(second - first).Time;
+
     /// <summary>This boost followed by another: a boost and a rotation.</summary>
     public LorentzTransform<TFrom, TNext> Then<TNext>(Boost<TTo, TNext> next)
         where TNext : struct, IFrame
