@@ -17,7 +17,7 @@ public static class LightTime
     /// <summary>When a signal that leaves at an event reaches a body.</summary>
     /// <param name="sent">The event of sending.</param>
     /// <param name="receiver">Where the body is at a time; slower than light throughout.</param>
-    /// <returns>The event of reception; its time to the last digit but one.</returns>
+    /// <returns>The event of reception; its time within 1e-15/(1 − β) of itself, β the speed of recession.</returns>
     /// <exception cref="ArgumentException">The signal never reaches the body: it is not slower than light.</exception>
     public static SpacetimeEvent<TFrame> Reception<TFrame>(
         SpacetimeEvent<TFrame> sent, Func<CoordinateTime<TFrame>, Displacement<TFrame>> receiver)

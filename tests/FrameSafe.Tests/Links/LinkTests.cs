@@ -16,7 +16,7 @@ public sealed class LinkTests
         SpacetimeEvent<Harbour> met = LightTime.Reception(
             default(SpacetimeEvent<Harbour>), time => Displacement<Harbour>.FromMetres(1e9 + (beta * C * time.InSeconds)));
 
-        Assert.Equal(1e9 / C / (1 - beta), met.Time.InSeconds, 1e-12 * met.Time.InSeconds);
+        Assert.Equal(1e9 / C / (1 - beta), met.Time.InSeconds, 2e-15 / (1 - beta) * met.Time.InSeconds);
     }
 
     [Fact]
