@@ -28,7 +28,8 @@ internal sealed class Diagram(double years)
         return string.Create(CultureInfo.InvariantCulture, $$"""
             <svg xmlns="http://www.w3.org/2000/svg" viewBox="0 0 {{width:F0}} {{height:F0}}" width="{{width:F0}}" role="img" aria-label="Spacetime diagram of the trip">
             <style>text{font:11px system-ui,sans-serif}polyline{fill:none;stroke-width:1.5}.port{stroke:#1f4e79;fill:#1f4e79}.ship{stroke:#b3261e;fill:#b3261e}polyline.port,polyline.ship{fill:none}.up{stroke:#1f4e79;stroke-dasharray:4 3;opacity:.6}.down{stroke:#b3261e;stroke-dasharray:4 3;opacity:.6}</style>
-            <text x="{{Margin:F0}}" y="20">time of the port in years, upward; distance in light years, to the right; light at 45°</text>
+            <text x="{{Margin:F0}}" y="16">time of the port in years, upward;</text>
+            <text x="{{Margin:F0}}" y="32">distance in light years, to the right; light at 45°</text>
             {{_marks}}</svg>
 
             """);

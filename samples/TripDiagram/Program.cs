@@ -20,7 +20,7 @@ internal static class Program
         Line("mass ratio of an ideal rocket", course.Trip.IdealMassRatio, "");
 
         var diagram = new Diagram(Math.Ceiling(end + lightYears));
-        diagram.Path(Every(0.05, end).Select(time => SpacetimeEvent<Port>.At(time, course.PlaceAt(time))), "ship");
+        diagram.Path(Every(0.05, Math.Ceiling(end + lightYears)).Select(time => SpacetimeEvent<Port>.At(time, course.PlaceAt(time))), "ship");
         diagram.Path(Every(1, Math.Ceiling(end + lightYears)).Select(time => SpacetimeEvent<Port>.At(time, Displacement<Port>.Zero)), "port");
         Exchange(course, diagram, end);
         File.WriteAllText(file, diagram.Svg(lightYears));
