@@ -10,26 +10,26 @@ internal static class Program
     {
         string file = arguments.Length > 0 ? arguments[0] : "trip.svg";
         const double lightYears = 4;
-        var course = new Course(acceleration: 9.80665, way: lightYears * Diagram.LightYear, cruise: 2.0);
-        double end = course.Trip.HomeTime.InSeconds / Diagram.Year;
+        Trip<Port, Ship> trip = Trip<Port, Ship>.Coast(acceleration: 9.80665, metres: lightYears * Diagram.LightYear, cruiseCelerityRatio: 2.0);
+        double end = trip.HomeTime.InSeconds / Diagram.Year;
 
-        Line("cruising at", course.Trip.Peak.Velocity.SpeedRatio, "c");
+        Line("cruising at", trip.Peak.Velocity.SpeedRatio, "c");
         Line("the port's clocks at arrival", end, "a");
-        Line("the ship's clock at arrival", course.Trip.ShipTime.InSeconds / Diagram.Year, "a");
-        Line("the port's ahead by", course.Trip.HomeAheadInSeconds / Diagram.Year, "a");
-        Line("mass ratio of an ideal rocket", course.Trip.IdealMassRatio, "");
+        Line("the ship's clock at arrival", trip.ShipTime.InSeconds / Diagram.Year, "a");
+        Line("the port's ahead by", trip.HomeAheadInSeconds / Diagram.Year, "a");
+        Line("mass ratio of an ideal rocket", trip.IdealMassRatio, "");
 
         var diagram = new Diagram(Math.Ceiling(end + lightYears));
-        diagram.Path(Every(0.05, Math.Ceiling(end + lightYears)).Select(time => SpacetimeEvent<Port>.At(time, course.PlaceAt(time))), "ship");
+        diagram.Path(Every(0.05, Math.Ceiling(end + lightYears)).Select(time => SpacetimeEvent<Port>.At(time, trip.PlaceAt(time))), "ship");
         diagram.Path(Every(1, Math.Ceiling(end + lightYears)).Select(time => SpacetimeEvent<Port>.At(time, Displacement<Port>.Zero)), "port");
-        Exchange(course, diagram, end);
+        Exchange(trip, diagram, end);
         File.WriteAllText(file, diagram.Svg(lightYears));
         Console.WriteLine($"Diagram: {file}");
         Constellation.Print();
     }
 
     // A signal each year of either clock, when it is sent and received on both.
-    private static void Exchange(Course course, Diagram diagram, double end)
+    private static void Exchange(Trip<Port, Ship> trip, Diagram diagram, double end)
     {
         Console.WriteLine();
         Console.WriteLine("From the port each year             From the ship each year of its own");
@@ -37,17 +37,17 @@ internal static class Program
         for (int year = 1; year <= (int)end; year++)
         {
             SpacetimeEvent<Port> sent = SpacetimeEvent<Port>.At(CoordinateTime<Port>.FromSeconds(year * Diagram.Year), Displacement<Port>.Zero);
-            SpacetimeEvent<Port> received = LightTime.Reception(sent, course.PlaceAt);
+            SpacetimeEvent<Port> received = LightTime.Reception(sent, trip.PlaceAt);
             diagram.Path([sent, received], "up");
             diagram.Tick(sent, year.ToString(CultureInfo.InvariantCulture), "port");
 
             string answer = "";
             ProperTime<Ship> reading = ProperTime<Ship>.FromSeconds(year * Diagram.Year);
-            if (reading <= course.Trip.ShipTime)
+            if (reading <= trip.ShipTime)
             {
-                CoordinateTime<Port> time = course.TimeOf(reading);
-                SpacetimeEvent<Port> answered = SpacetimeEvent<Port>.At(time, course.PlaceAt(time));
-                SpacetimeEvent<Port> home = LightTime.Reception(answered, _ => Displacement<Port>.Zero);
+                (CoordinateTime<Port> time, CoordinateTime<Port> back) = trip.SignalFromShip(reading);
+                SpacetimeEvent<Port> answered = SpacetimeEvent<Port>.At(time, trip.PlaceAt(time));
+                SpacetimeEvent<Port> home = SpacetimeEvent<Port>.At(back, Displacement<Port>.Zero);
                 diagram.Path([answered, home], "down");
                 diagram.Tick(answered, year.ToString(CultureInfo.InvariantCulture), "ship");
                 answer = string.Create(CultureInfo.InvariantCulture, $"{year,8}{time.InSeconds / Diagram.Year,13:F3}{home.Time.InSeconds / Diagram.Year,12:F3}");
@@ -55,7 +55,7 @@ internal static class Program
 
             Console.WriteLine(string.Create(
                 CultureInfo.InvariantCulture,
-                $"  {year,8}{received.Time.InSeconds / Diagram.Year,12:F3}{course.ClockAt(received.Time).InSeconds / Diagram.Year,10:F3}    {answer}"));
+                $"  {year,8}{received.Time.InSeconds / Diagram.Year,12:F3}{trip.ShipTimeAt(received.Time).InSeconds / Diagram.Year,10:F3}    {answer}"));
         }
 
         Console.WriteLine();

@@ -102,6 +102,19 @@ public sealed partial class ToolTests(PackedFeed feed)
     }
 
     [Fact]
+    public void A_setting_that_cannot_be_read_is_named_with_its_file_and_what_is_allowed()
+    {
+        string sample = CopySample();
+        File.WriteAllText(Path.Combine(sample, ".editorconfig"), "root = true\n[*.cs]\nframesafe.error_budget = tiny\n");
+
+        CommandResult survey = Command.Run(sample, feed.Tool, "survey", ".");
+
+        Assert.Equal(1, survey.ExitCode);
+        Assert.Contains(".editorconfig(3,1) FRAME604", survey.Output);
+        Assert.Contains("is `tiny`; a positive number is wanted", survey.Output.ReplaceLineEndings(" "));
+    }
+
+    [Fact]
     public void An_unreadable_ledger_is_named_and_left_alone()
     {
         string sample = CopySample();

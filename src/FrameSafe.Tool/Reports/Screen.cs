@@ -27,7 +27,7 @@ internal sealed class Screen(IAnsiConsole console, bool quiet)
         {
             foreach (Finding finding in survey.Findings.Take(MostShown))
             {
-                Console.MarkupLineInterpolated($"[bold]{finding.Place.Path}({finding.Place.Line},{finding.Place.Column})[/] [yellow]{finding.Rule}[/] in {finding.Member}");
+                Console.MarkupLineInterpolated($"[bold]{finding.Place.Path}({finding.Place.Line},{finding.Place.Column})[/] [yellow]{finding.Rule}[/]{(finding.Member.Length > 0 ? " in " + finding.Member : "")}");
                 Console.WriteLine("    " + finding.SourceLine);
                 Console.WriteLine("    " + finding.Message);
                 Console.WriteLine();

@@ -69,6 +69,9 @@ internal static class Surveyor
         ];
         string line = "";
         string member = "";
+        Place place = PlaceOf(diagnostic.Location, root);
+        if (diagnostic.Location == Location.None)
+            (place, line) = await SettingAsync(diagnostic.GetMessage(CultureInfo.InvariantCulture), project, root, cancellation) ?? (place, line);
         if (diagnostic.Location.SourceTree is { } tree)
         {
             SourceText text = await tree.GetTextAsync(cancellation);
@@ -80,7 +83,7 @@ internal static class Surveyor
             diagnostic.Id,
             diagnostic.Severity,
             diagnostic.GetMessage(CultureInfo.InvariantCulture),
-            PlaceOf(diagnostic.Location, root),
+            place,
             project.Name,
             member,
             line,
@@ -89,6 +92,24 @@ internal static class Surveyor
             Number(diagnostic, FindingProperties.Budget),
             Number(diagnostic, FindingProperties.MaxSpeed),
             Property(diagnostic, FindingProperties.Frames)?.Split(';') ?? []);
+    }
+
+    // A finding about a setting has no place for the compiler; the file that sets it is among the project's.
+    private static async Task<(Place Place, string Line)?> SettingAsync(string message, Project project, string root, CancellationToken cancellation)
+    {
+        foreach (AnalyzerConfigDocument file in project.AnalyzerConfigDocuments.OrderBy(file => file.FilePath, StringComparer.Ordinal))
+        {
+            SourceText text = await file.GetTextAsync(cancellation);
+            foreach (TextLine line in text.Lines)
+            {
+                string setting = line.ToString().Trim();
+                string key = setting.Split('=')[0].Trim();
+                if (key.StartsWith("framesafe.", StringComparison.OrdinalIgnoreCase) && message.Contains(key + " ", StringComparison.OrdinalIgnoreCase))
+                    return (new(Path.GetRelativePath(root, file.FilePath!).Replace('\\', '/'), line.LineNumber + 1, 1, line.LineNumber + 1, line.ToString().Length + 1), setting);
+            }
+        }
+
+        return null;
     }
 
     // Types and member by name, as they are nested: "CourierShip.ClockAt".
@@ -108,9 +129,9 @@ internal static class Surveyor
 
     private static Place PlaceOf(Location location, string root)
     {
-        if (!location.IsInSource)
-            return new("", 0, 0, 0, 0);
         FileLinePositionSpan span = location.GetLineSpan();
+        if (!span.IsValid)
+            return new("", 0, 0, 0, 0);
         return new(
             Path.GetRelativePath(root, span.Path).Replace('\\', '/'),
             span.StartLinePosition.Line + 1,
