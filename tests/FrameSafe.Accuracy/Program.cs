@@ -8,7 +8,8 @@ if (args.Length != 1 || !Directory.Exists(args[0]))
 }
 
 (IReadOnlyList<Row> rows, IReadOnlyList<string> uncovered) = Measurer.Measure(args[0]);
-Console.WriteLine($"{"file",-32} {"quantity",-28} {"cases",5} {"worst ulp",10} {"allowed",10}  case");
+// Of each quantity the case that comes nearest to what is allowed for it, or is beyond it the most.
+Console.WriteLine($"{"file",-32} {"quantity",-28} {"cases",5} {"error/ulp",10} {"allowed",10}  in the case nearest its bound");
 foreach (Row row in rows)
 {
     Console.WriteLine(string.Create(

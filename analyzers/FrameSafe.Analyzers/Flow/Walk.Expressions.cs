@@ -267,6 +267,9 @@ internal sealed partial class Walk
         _ => Value.Unknown,
     };
 
+    // The speed of light, known by its value alone: what it is meant as, a speed or a light second, its neighbours tell.
+    private static bool IsBareLight(Value value) => value is { Origin: null, Tag: { IsConstant: true, Kind: QuantityKind.SignalSpeed } };
+
     // A number of the code that no declaration stands behind.
     private static bool IsBare(Value value) => value.Origin is null && (value.Tag.IsConstant || value.Tag.IsUnknown);
 
@@ -358,6 +361,9 @@ internal sealed partial class Walk
     {
         switch (kind)
         {
+            // c by its value times a bare number may be a light year as well as twice c: seconds hide in bare numbers.
+            case BinaryOperatorKind.Multiply or BinaryOperatorKind.Divide when IsBareLight(left) != IsBareLight(right) && (left.Tag.IsPure || right.Tag.IsPure):
+                return Value.Unknown;
             case BinaryOperatorKind.Add when type?.SpecialType != SpecialType.System_String:
                 return Meet(Meeting.Sum, "added");
             case BinaryOperatorKind.Subtract:

@@ -101,6 +101,8 @@ internal sealed partial class Walk : OperationVisitor<object?, Value>
 
     private void Note(SyntaxNode place, Clash? clash, Side left, Side right, string verb)
     {
+        if (clash is { Kind: ClashKind.Dimension } && (IsBareLight(left.Value) || IsBareLight(right.Value)))
+            return;
         if (clash is not null && _environment.IsReachable && !(_isBoundary && IsCrossing(clash.Kind)))
             _encounters.Add(new(place, clash, left, right, verb));
     }

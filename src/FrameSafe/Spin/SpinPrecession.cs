@@ -40,7 +40,7 @@ public readonly struct SpinPrecession<TLab>
     [return: InFrame(nameof(TLab))]
     public (double X, double Y, double Z) OfSpinAgainstMotion(Velocity<TLab> velocity, ElectromagneticField<TLab> field)
     {
-        // Ωs − Ωm = −(q/m)[aB − aγ/(γ+1)(β·B)β − (1/γ)(B·n)n·… ]; what the two share is taken out before it could cancel.
+        // Both in twice the precision: what they share cancels without loss.
         ExtendedTriple spin = Spin(velocity, field);
         ExtendedTriple motion = Motion(velocity, field);
         return Parts(spin + (motion * -1));

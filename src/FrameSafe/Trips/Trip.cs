@@ -227,6 +227,7 @@ public readonly struct Trip<THome, TShip>
     /// <param name="home">The time at home.</param>
     /// <param name="ship">The ship's time; above 0 and shorter.</param>
     /// <exception cref="ArgumentOutOfRangeException">The ship's time is not the shorter one.</exception>
+    [FrameBoundary]
     public static Trip<THome, TShip> FlipIn(CoordinateTime<THome> home, ProperTime<TShip> ship)
     {
         Require.Positive(ship.InSeconds, nameof(ship));

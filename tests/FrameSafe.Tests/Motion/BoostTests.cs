@@ -136,9 +136,10 @@ public sealed class BoostTests
         Assert.Contains(message, refused.Message);
     }
 
-    [Fact]
-    public void A_percentage_is_refused_with_a_hint()
-        => Assert.Contains("a percentage", Assert.Throws<ArgumentOutOfRangeException>(() => Velocity<Harbour>.FromSpeedRatio(42)).Message);
+    [Theory]
+    [InlineData(42)]
+    public void A_percentage_is_refused_with_a_hint(double percentage)
+        => Assert.Contains("a percentage", Assert.Throws<ArgumentOutOfRangeException>(() => Velocity<Harbour>.FromSpeedRatio(percentage)).Message);
 
     [Fact]
     public void The_default_of_everything_is_a_valid_zero()
