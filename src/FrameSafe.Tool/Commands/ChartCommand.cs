@@ -9,7 +9,7 @@ internal static class ChartCommand
 {
     internal static Command Create()
     {
-        Argument<string> path = Running.PathArgument();
+        Argument<string[]> sources = Running.SourcesArgument();
         var output = new Option<string?>("--output", "-o") { Description = "The SVG file to write; standard output if not given." };
         var command = new Command(
             "chart",
@@ -21,20 +21,19 @@ internal static class ChartCommand
             Example:
               framesafe chart Mission.sln --output frames.svg
             """)
-        { path, output };
+        { sources, output };
         command.SetAction((parsed, cancellation) => Running.RunAsync(async () =>
         {
             string? file = parsed.GetValue(output);
             if (file is not null)
-                FileReport.CheckWritable(file);
-            Survey survey = await Running.WithSolutionAsync(
-                parsed.GetValue(path)!, (loaded, tell) => Surveyor.RunAsync(loaded, tell, cancellation), cancellation);
+                ReportFile.CheckWritable(file);
+            Survey survey = await Running.SurveyAsync(parsed, sources, cancellation);
             string svg = ChartDrawing.Svg(survey.Chart, survey.Findings);
             if (file is null)
                 await Console.Out.WriteAsync(svg);
             else
-                FileReport.Write(file, svg);
-            return survey.CompileErrors.Count > 0 ? ExitCode.DoesNotCompile : ExitCode.Clean;
+                ReportFile.Write(file, svg);
+            return survey.Troubles.Count > 0 ? ExitCode.DoesNotCompile : ExitCode.Clean;
         }));
         return command;
     }

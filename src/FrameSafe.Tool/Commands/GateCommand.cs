@@ -1,5 +1,4 @@
 using System.CommandLine;
-using System.Globalization;
 using FrameSafe.Tool.Gating;
 using FrameSafe.Tool.Reports;
 using FrameSafe.Tool.Surveying;
@@ -11,17 +10,19 @@ internal static class GateCommand
 {
     internal static Command Create()
     {
-        Argument<string> path = Running.PathArgument();
+        Argument<string[]> sources = Running.SourcesArgument();
         var ledgerFile = new Option<string>("--ledger", "-l") { Description = "The ledger of accepted findings.", Required = true };
         var start = new Option<bool>("--start") { Description = "Write the first ledger from what is found now; an existing one is not touched." };
         var shrink = new Option<bool>("--shrink") { Description = "Take out of the ledger what is gone; nothing is ever put in." };
+        var report = new Option<string?>("--report", "-r") { Description = "Write all findings to a file as well, as survey does." };
         var command = new Command(
             "gate",
             """
             Pass or fail against a ledger of accepted findings, which may only shrink.
 
             Fails on a finding that the ledger does not hold, on an entry that is gone (until --shrink takes it out), and on
-            coverage of tags below the ledger's. New findings are printed as file(line,column): warning ID: message.
+            coverage of tags below the ledger's. New findings are printed as file(line,column): warning ID: message, which CI
+            systems show at the line. A finding is known by its rule, its member and its code: lines may move, files be renamed.
 
             Exit codes: 0 pass, 1 fail, 2 bad input, 3 a project does not compile.
 
@@ -29,73 +30,53 @@ internal static class GateCommand
               framesafe gate Mission.sln --ledger framesafe.ledger --start
               framesafe gate Mission.sln --ledger framesafe.ledger
               framesafe gate Mission.sln --ledger framesafe.ledger --shrink
+              framesafe gate north.sarif south.sarif --ledger framesafe.ledger
             """)
-        { path, ledgerFile, start, shrink };
+        { sources, ledgerFile, start, shrink, report };
         command.SetAction((parsed, cancellation) => Running.RunAsync(async () =>
         {
             string file = parsed.GetValue(ledgerFile)!;
             bool starts = parsed.GetValue(start);
-            FileReport.CheckWritable(file);
+            string? reportFile = parsed.GetValue(report);
+            ReportFile.CheckWritable(file);
+            if (reportFile is not null)
+                ReportFormat.Check(reportFile);
             if (starts && File.Exists(file))
                 throw new BadInputException($"{file}: exists already; a ledger is started once, and then only shrinks.");
+            if (starts && parsed.GetValue(shrink))
+                throw new BadInputException("--start and --shrink: one of them at a time.");
             Ledger? ledger = starts ? null : Ledger.Read(file);
-            Survey survey = await Running.WithSolutionAsync(
-                parsed.GetValue(path)!, (loaded, tell) => Surveyor.RunAsync(loaded, tell, cancellation), cancellation);
-            if (survey.CompileErrors.Count > 0)
+
+            Survey survey = await Running.SurveyAsync(parsed, sources, cancellation);
+            if (reportFile is not null)
+                ReportFormat.Write(reportFile, survey);
+            if (survey.Troubles.Count > 0)
             {
-                foreach ((string project, string error) in survey.CompileErrors)
-                    Console.WriteLine($"{project} does not compile, so nothing can be said for it: {error}");
+                foreach (Trouble trouble in survey.Troubles)
+                    Console.WriteLine($"{trouble.Project} {trouble.What}, so nothing can be said for it: {trouble.Detail}");
                 return ExitCode.DoesNotCompile;
             }
 
             var current = Ledger.Of(survey);
             if (ledger is null)
             {
-                FileReport.Write(file, current.ToText());
+                ReportFile.Write(file, current.ToText());
                 Console.WriteLine($"Ledger started with {Screen.Count(survey.Findings.Count)}: {file}");
                 return ExitCode.Clean;
             }
 
-            return Judge(ledger, current, survey, file, parsed.GetValue(shrink));
+            var judgement = Judgement.Of(ledger, current, survey);
+            bool shrinks = parsed.GetValue(shrink);
+            foreach (string line in judgement.Lines(shrinks))
+                Console.WriteLine(line);
+            if (shrinks && judgement.CanShrink)
+            {
+                ReportFile.Write(file, ledger.Shrunk(current).ToText());
+                Console.WriteLine($"Ledger shrunk by {Screen.Count(judgement.GoneCount)}: {file}");
+            }
+
+            return judgement.Passes(shrinks) ? ExitCode.Clean : ExitCode.Findings;
         }));
         return command;
     }
-
-    private static int Judge(Ledger ledger, Ledger current, Survey survey, string file, bool shrinks)
-    {
-        (IReadOnlyList<LedgerEntry> added, IReadOnlyList<LedgerEntry> gone) = ledger.Compare(current);
-        foreach (LedgerEntry entry in added)
-        {
-            // Of findings alike the later ones count as the new ones.
-            foreach (Finding finding in survey.Findings
-                .Where(finding => (finding.Rule, finding.Place.Path, finding.Member, finding.SourceLine) == (entry.Rule, entry.File, entry.Member, entry.Code))
-                .TakeLast(entry.Count))
-            {
-                Console.WriteLine($"{finding.Place.Path}({finding.Place.Line},{finding.Place.Column}): warning {finding.Rule}: {finding.Message}");
-            }
-        }
-
-        bool covered = current.CoveragePerMille >= ledger.CoveragePerMille;
-        if (!covered)
-            Console.WriteLine($"Coverage of tags fell to {PerCent(current.CoveragePerMille)} from {PerCent(ledger.CoveragePerMille)}.");
-        if (gone.Count > 0 && !shrinks)
-        {
-            foreach (LedgerEntry entry in gone)
-                Console.WriteLine($"{entry.File}: {entry.Rule} in {entry.Member} is gone from the code ({entry.Code}); take it out of the ledger with --shrink.");
-        }
-
-        if (shrinks && (gone.Count > 0 || current.CoveragePerMille > ledger.CoveragePerMille))
-        {
-            FileReport.Write(file, ledger.Shrunk(current).ToText());
-            Console.WriteLine($"Ledger shrunk by {Screen.Count(gone.Sum(entry => entry.Count))}: {file}");
-        }
-
-        bool passes = added.Count == 0 && covered && (gone.Count == 0 || shrinks);
-        Console.WriteLine(passes
-            ? $"Gate passed: {Screen.Count(survey.Findings.Count)}, all of them in the ledger."
-            : $"Gate failed: {added.Sum(entry => entry.Count)} new, {gone.Sum(entry => entry.Count)} gone.");
-        return passes ? ExitCode.Clean : ExitCode.Findings;
-    }
-
-    private static string PerCent(int perMille) => (perMille / 10.0).ToString("0.0", CultureInfo.InvariantCulture) + " %";
 }

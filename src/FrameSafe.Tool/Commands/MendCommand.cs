@@ -29,32 +29,51 @@ internal static class MendCommand
               framesafe mend Mission.sln --rule FRAME401 FRAME402 --apply
             """)
         { path, apply, rules, files, dirty };
-        command.SetAction((parsed, cancellation) => Running.RunAsync(() => Running.WithSolutionAsync(
-            parsed.GetValue(path)!,
-            (loaded, tell) => RunAsync(
-                loaded,
-                new(parsed.GetValue(apply), parsed.GetValue(rules) ?? [], parsed.GetValue(files) ?? [], parsed.GetValue(dirty)),
-                tell,
-                cancellation),
-            cancellation)));
+        command.SetAction((parsed, cancellation) => Running.RunAsync(() =>
+        {
+            var wish = new Wish(
+                parsed.GetValue(path)!, parsed.GetValue(apply), parsed.GetValue(rules) ?? [], parsed.GetValue(files) ?? [], parsed.GetValue(dirty));
+            CheckRules(wish.Rules);
+            return RunAsync(wish, parsed, cancellation);
+        }));
         return command;
     }
 
-    private static async Task<int> RunAsync(LoadedSolution loaded, Wish wish, Action<string> tell, CancellationToken cancellation)
+    private static async Task<int> RunAsync(Wish wish, ParseResult parsed, CancellationToken cancellation)
     {
-        HashSet<string> wantedFiles = [.. wish.Files.Select(Path.GetFullPath)];
-        CheckRules(wish.Rules);
+        Outcome outcome = await Running.WithProgressAsync(parsed, tell => MendAsync(wish, tell, cancellation));
+        if (!parsed.GetValue(Running.Quiet))
+        {
+            foreach (FileChange change in outcome.Changes)
+                Console.Write(change.Diff(outcome.Root));
+        }
+
+        string files = outcome.Changes.Count == 1 ? "1 file" : $"{outcome.Changes.Count} files";
+        if (wish.Apply)
+        {
+            await WriteAsync(outcome, wish.OverUncommitted, cancellation);
+            Console.WriteLine($"{files} mended; {Screen.Count(outcome.Left)} left.");
+            return outcome.Left == 0 ? ExitCode.Clean : ExitCode.Findings;
+        }
+
+        Console.WriteLine(outcome.Changes.Count == 0
+            ? $"Nothing can be mended; {Screen.Count(outcome.Left)} left."
+            : $"{files} would change and {Screen.Count(outcome.Left)} be left; --apply writes them.");
+        return outcome.Changes.Count == 0 && outcome.Left == 0 ? ExitCode.Clean : ExitCode.Findings;
+    }
+
+    private static async Task<Outcome> MendAsync(Wish wish, Action<string> tell, CancellationToken cancellation)
+    {
+        using LoadedSolution loaded = await LoadedSolution.OpenAsync(wish.Path, tell, cancellation);
+        HashSet<string> files = [.. wish.Files.Select(Path.GetFullPath)];
+        CheckFiles(loaded, wish.Files);
         Solution mended = await Mender.RunAsync(
             loaded.Solution,
             [.. loaded.Projects.Select(project => project.Id)],
             finding => (wish.Rules.Length == 0 || wish.Rules.Contains(finding.Id))
-                && (wantedFiles.Count == 0 || wantedFiles.Contains(finding.Location.SourceTree!.FilePath)),
+                && (files.Count == 0 || files.Contains(finding.Location.SourceTree!.FilePath)),
             tell,
             cancellation);
-        IReadOnlyList<FileChange> changes = await FileChange.BetweenAsync(loaded.Solution, mended, cancellation);
-        foreach (FileChange change in changes)
-            Console.Write(change.Diff(loaded.Root));
-
         int left = 0;
         foreach (Project project in loaded.Projects)
         {
@@ -63,65 +82,42 @@ internal static class MendCommand
                 left += (await Surveyor.DiagnosticsAsync(after, compilation, cancellation)).Length;
         }
 
-        if (!wish.Apply)
-        {
-            Console.WriteLine(changes.Count == 0
-                ? $"Nothing can be mended; {Screen.Count(left)}."
-                : $"{changes.Count} file(s) would change, {Screen.Count(left)} would be left; --apply writes them.");
-            return changes.Count == 0 && left == 0 ? ExitCode.Clean : ExitCode.Findings;
-        }
-
-        await WriteAsync(loaded.Root, changes, wish.OverUncommitted, cancellation);
-        Console.WriteLine($"{changes.Count} file(s) mended, {Screen.Count(left)} left.");
-        return left == 0 ? ExitCode.Clean : ExitCode.Findings;
+        return new(loaded.Root, await FileChange.BetweenAsync(loaded.Solution, mended, cancellation), left);
     }
 
     private static void CheckRules(string[] rules)
     {
-        HashSet<string> known = [.. Surveyor.Analyzers[0].SupportedDiagnostics.Select(rule => rule.Id)];
         foreach (string rule in rules)
         {
-            if (!known.Contains(rule) && !rule.StartsWith("CS", StringComparison.Ordinal))
-                throw new BadInputException($"--rule {rule}: there is no such rule; the rules are {string.Join(", ", known.Order(StringComparer.Ordinal))}.");
+            if (Surveyor.Rules.All(known => known.Id != rule) && !rule.StartsWith("CS", StringComparison.Ordinal))
+                throw new BadInputException($"--rule {rule}: there is no such rule; the rules are {string.Join(", ", Surveyor.Rules.Select(known => known.Id))}.");
         }
     }
 
-    // All new texts are beside their files before the first is put in its place.
-    private static async Task WriteAsync(string root, IReadOnlyList<FileChange> changes, bool overUncommitted, CancellationToken cancellation)
+    private static void CheckFiles(LoadedSolution loaded, string[] files)
     {
-        if (changes.Count == 0)
+        foreach (string file in files)
+        {
+            if (loaded.Solution.GetDocumentIdsWithFilePath(Path.GetFullPath(file)).IsEmpty)
+                throw new BadInputException($"--file {file}: no file of the solution; a source file that one of its projects compiles is wanted.");
+        }
+    }
+
+    private static async Task WriteAsync(Outcome outcome, bool overUncommitted, CancellationToken cancellation)
+    {
+        if (outcome.Changes.Count == 0)
             return;
-        if (!overUncommitted && await GitState.UncommittedAsync(root, changes.Select(change => change.Path), cancellation) is { Count: > 0 } dirty)
+        if (!overUncommitted
+            && await GitState.UncommittedAsync(outcome.Root, outcome.Changes.Select(change => change.Path), cancellation) is { Count: > 0 } dirty)
         {
             throw new BadInputException(
                 $"{dirty[0]}: has uncommitted changes{(dirty.Count > 1 ? $" (and {dirty.Count - 1} more)" : "")}; commit them, or mend with --over-uncommitted.");
         }
 
-        var written = new List<(string Beside, string Path)>();
-        try
-        {
-            foreach (FileChange change in changes)
-            {
-                cancellation.ThrowIfCancellationRequested();
-                written.Add((change.WriteBeside(), change.Path));
-            }
-
-            foreach ((string beside, string path) in written)
-                File.Move(beside, path, overwrite: true);
-        }
-        catch (Exception exception) when (exception is IOException or UnauthorizedAccessException)
-        {
-            throw new BadInputException($"{root}: cannot be written: {exception.Message}");
-        }
-        finally
-        {
-            foreach ((string beside, _) in written)
-            {
-                if (File.Exists(beside))
-                    File.Delete(beside);
-            }
-        }
+        FileReplacement.Run(outcome.Changes, cancellation);
     }
 
-    private sealed record Wish(bool Apply, string[] Rules, string[] Files, bool OverUncommitted);
+    private sealed record Wish(string Path, bool Apply, string[] Rules, string[] Files, bool OverUncommitted);
+
+    private sealed record Outcome(string Root, IReadOnlyList<FileChange> Changes, int Left);
 }

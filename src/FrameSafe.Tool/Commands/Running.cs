@@ -1,6 +1,6 @@
 using System.CommandLine;
 using FrameSafe.Tool.Loading;
-using FrameSafe.Tool.Reports;
+using FrameSafe.Tool.Surveying;
 using Spectre.Console;
 
 namespace FrameSafe.Tool.Commands;
@@ -8,13 +8,22 @@ namespace FrameSafe.Tool.Commands;
 /// <summary>What every command shares: its options, its way of telling progress, its way of failing.</summary>
 internal static class Running
 {
+    internal static Option<bool> Quiet { get; } = new("--quiet", "-q") { Description = "Say only what it comes to.", Recursive = true };
+
+    internal static Option<bool> Verbose { get; } = new("--verbose", "-v") { Description = "Say each step, on standard error.", Recursive = true };
+
     internal static Argument<string> PathArgument() => new("path")
     {
         Description = "A project (.csproj), a solution (.sln, .slnx), or a folder that holds one. Opening it runs its MSBuild logic.",
         DefaultValueFactory = static _ => ".",
     };
 
-    internal static Option<bool> QuietOption() => new("--quiet", "-q") { Description = "Only the summary." };
+    internal static Argument<string[]> SourcesArgument() => new("path")
+    {
+        Description = "Projects (.csproj), solutions (.sln, .slnx), folders that hold one, or earlier reports (.sarif). Opening a project runs its MSBuild logic.",
+        DefaultValueFactory = static _ => ["."],
+        Arity = ArgumentArity.ZeroOrMore,
+    };
 
     /// <summary>Runs a command; what cannot be done is one line on standard error.</summary>
     internal static async Task<int> RunAsync(Func<Task<int>> command)
@@ -35,23 +44,19 @@ internal static class Running
         }
     }
 
-    /// <summary>Opens a path and works on it, with progress on standard error.</summary>
-    internal static async Task<T> WithSolutionAsync<T>(string path, Func<LoadedSolution, Action<string>, Task<T>> work, CancellationToken cancellation)
+    internal static Task<Survey> SurveyAsync(ParseResult parsed, Argument<string[]> sources, CancellationToken cancellation)
+        => WithProgressAsync(parsed, tell => Sources.SurveyAsync(parsed.GetValue(sources)!, tell, cancellation));
+
+    /// <summary>Does long work with progress on standard error: a line that changes on a terminal, lines where they are asked for.</summary>
+    internal static async Task<T> WithProgressAsync<T>(ParseResult parsed, Func<Action<string>, Task<T>> work)
     {
+        if (parsed.GetValue(Verbose))
+            return await work(what => Console.Error.WriteLine(what));
+        if (parsed.GetValue(Quiet) || Console.IsErrorRedirected)
+            return await work(static _ => { });
         IAnsiConsole progress = AnsiConsole.Create(new AnsiConsoleSettings { Out = new AnsiConsoleOutput(Console.Error) });
-        if (!progress.Profile.Capabilities.Interactive || Console.IsErrorRedirected)
-        {
-            using LoadedSolution loaded = await LoadedSolution.OpenAsync(path, static _ => { }, cancellation);
-            return await work(loaded, static _ => { });
-        }
-
-        return await progress.Status().StartAsync("opening", async status =>
-        {
-            void Tell(string what) => status.Status(Markup.Escape(what));
-            using LoadedSolution loaded = await LoadedSolution.OpenAsync(path, Tell, cancellation);
-            return await work(loaded, Tell);
-        });
+        return progress.Profile.Capabilities.Interactive
+            ? await progress.Status().StartAsync("opening", status => work(what => status.Status(Markup.Escape(what))))
+            : await work(static _ => { });
     }
-
-    internal static Screen Screen(bool quiet) => Reports.Screen.For(Console.Out, quiet);
 }

@@ -5,13 +5,18 @@ using FrameSafe.Tool.Surveying;
 
 namespace FrameSafe.Tool.Gating;
 
-/// <summary>One accepted finding, known by rule, member and code: lines may move, files may grow.</summary>
-/// <param name="Rule">The rule.</param>
-/// <param name="File">The file, relative to the surveyed root.</param>
+/// <summary>One accepted finding, known by rule, project, member and code: lines may move, files be renamed.</summary>
+/// <param name="File">The file that it was first found in, for the reader.</param>
+/// <param name="Project">The project.</param>
 /// <param name="Member">The member.</param>
+/// <param name="Rule">The rule.</param>
 /// <param name="Code">The line of code, without its indentation.</param>
 /// <param name="Count">How many findings are alike in all of these.</param>
-internal sealed record LedgerEntry(string Rule, string File, string Member, string Code, int Count);
+internal sealed record LedgerEntry(string File, string Project, string Member, string Rule, string Code, int Count)
+{
+    [JsonIgnore]
+    internal FindingIdentity Identity => new(Rule, Project, Member, Code);
+}
 
 /// <summary>The accepted known findings, which may only become fewer, and the coverage, which may only become more.</summary>
 internal sealed class Ledger
@@ -40,22 +45,19 @@ internal sealed class Ledger
     /// <summary>The least coverage, in thousandths.</summary>
     internal int CoveragePerMille { get; }
 
-    internal static Ledger Of(Survey survey)
-    {
-        int tagged = survey.Coverage.Sum(row => row.Tagged);
-        int numbers = survey.Coverage.Sum(row => row.Numbers);
-        return new(
-            [
-                .. survey.Findings
-                    .GroupBy(finding => (finding.Place.Path, finding.Member, finding.Rule, finding.SourceLine))
-                    .Select(group => new LedgerEntry(group.Key.Rule, group.Key.Path, group.Key.Member, group.Key.SourceLine, group.Count()))
-                    .OrderBy(entry => entry.File, StringComparer.Ordinal)
-                    .ThenBy(entry => entry.Member, StringComparer.Ordinal)
-                    .ThenBy(entry => entry.Rule, StringComparer.Ordinal)
-                    .ThenBy(entry => entry.Code, StringComparer.Ordinal),
-            ],
-            numbers == 0 ? 1000 : (int)(1000L * tagged / numbers));
-    }
+    internal static Ledger Of(Survey survey) => new(
+        [
+            .. survey.Findings
+                .GroupBy(finding => finding.Identity)
+                .Select(group => new LedgerEntry(
+                    group.First().Place.Path, group.Key.Project, group.Key.Member, group.Key.Rule, group.Key.Code, group.Count()))
+                .OrderBy(entry => entry.File, StringComparer.Ordinal)
+                .ThenBy(entry => entry.Member, StringComparer.Ordinal)
+                .ThenBy(entry => entry.Rule, StringComparer.Ordinal)
+                .ThenBy(entry => entry.Code, StringComparer.Ordinal)
+                .ThenBy(entry => entry.Project, StringComparer.Ordinal),
+        ],
+        survey.Numbers == 0 ? 1000 : (int)(1000L * survey.Tagged / survey.Numbers));
 
     /// <exception cref="BadInputException">There is no such file, or it is no ledger of this version.</exception>
     internal static Ledger Read(string path)
@@ -68,8 +70,10 @@ internal sealed class Ledger
                 ?? throw new BadInputException($"{path}: not a ledger: the file is empty.");
             if (form.Version != CurrentVersion)
                 throw new BadInputException($"{path}: a ledger of version {form.Version}; this tool reads version {CurrentVersion}.");
-            if (form.Entries.Any(entry => entry.Count < 1))
-                throw new BadInputException($"{path}: not a ledger: an entry's count is below 1.");
+            if (form.Entries.FirstOrDefault(entry => entry.Count < 1) is { } empty)
+                throw new BadInputException($"{path}: not a ledger: the count of {empty.Rule} in {empty.Member} is {empty.Count}; it is at least 1.");
+            if (form.CoveragePerMille is < 0 or > 1000)
+                throw new BadInputException($"{path}: not a ledger: coveragePerMille is {form.CoveragePerMille}; it is from 0 to 1000.");
             return new(form.Entries, form.CoveragePerMille);
         }
         catch (JsonException exception)
@@ -92,11 +96,11 @@ internal sealed class Ledger
     /// <summary>This ledger less what is gone; never with what is new.</summary>
     internal Ledger Shrunk(Ledger current)
     {
-        Dictionary<(string, string, string, string), int> left = Counts(current.Entries);
+        Dictionary<FindingIdentity, int> left = Counts(current.Entries);
         return new(
             [
                 .. Entries
-                    .Select(entry => entry with { Count = Math.Min(entry.Count, left.GetValueOrDefault(Key(entry))) })
+                    .Select(entry => entry with { Count = Math.Min(entry.Count, left.GetValueOrDefault(entry.Identity)) })
                     .Where(entry => entry.Count > 0),
             ],
             Math.Max(CoveragePerMille, current.CoveragePerMille));
@@ -104,19 +108,17 @@ internal sealed class Ledger
 
     private static List<LedgerEntry> Beyond(IReadOnlyList<LedgerEntry> entries, IReadOnlyList<LedgerEntry> others)
     {
-        Dictionary<(string, string, string, string), int> known = Counts(others);
+        Dictionary<FindingIdentity, int> known = Counts(others);
         return
         [
             .. entries
-                .Select(entry => entry with { Count = entry.Count - known.GetValueOrDefault(Key(entry)) })
+                .Select(entry => entry with { Count = entry.Count - known.GetValueOrDefault(entry.Identity) })
                 .Where(entry => entry.Count > 0),
         ];
     }
 
-    private static Dictionary<(string, string, string, string), int> Counts(IReadOnlyList<LedgerEntry> entries)
-        => entries.GroupBy(Key).ToDictionary(group => group.Key, group => group.Sum(entry => entry.Count));
-
-    private static (string, string, string, string) Key(LedgerEntry entry) => (entry.Rule, entry.File, entry.Member, entry.Code);
+    private static Dictionary<FindingIdentity, int> Counts(IReadOnlyList<LedgerEntry> entries)
+        => entries.GroupBy(entry => entry.Identity).ToDictionary(group => group.Key, group => group.Sum(entry => entry.Count));
 
     private sealed record Form(int Version, int CoveragePerMille, IReadOnlyList<LedgerEntry> Entries);
 }

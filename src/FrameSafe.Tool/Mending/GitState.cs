@@ -11,7 +11,7 @@ internal static class GitState
     {
         try
         {
-            using var git = Process.Start(new ProcessStartInfo("git", ["-C", folder, "status", "--porcelain", "--", .. files])
+            using var git = Process.Start(new ProcessStartInfo("git", ["-C", folder, "status", "--porcelain", "-z", "--", .. files])
             {
                 RedirectStandardOutput = true,
                 RedirectStandardError = true,
@@ -20,7 +20,7 @@ internal static class GitState
                 return null;
             string output = await git.StandardOutput.ReadToEndAsync(cancellation);
             await git.WaitForExitAsync(cancellation);
-            return git.ExitCode == 0 ? [.. output.Split('\n', StringSplitOptions.RemoveEmptyEntries).Select(line => line[3..])] : null;
+            return git.ExitCode == 0 ? [.. output.Split('\0', StringSplitOptions.RemoveEmptyEntries).Select(line => line[3..])] : null;
         }
         catch (Win32Exception)
         {

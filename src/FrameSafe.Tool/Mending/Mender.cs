@@ -35,11 +35,25 @@ internal static class Mender
                 Solution mended = await RoundAsync(project, wanted, cancellation);
                 if (mended == solution)
                     break;
-                solution = mended;
+                solution = await AlikeAsync(solution, mended, cancellation);
             }
         }
 
         return solution;
+    }
+
+    /// <summary>A file that several projects compile is mended in one of them; the others get the same text.</summary>
+    private static async Task<Solution> AlikeAsync(Solution before, Solution after, CancellationToken cancellation)
+    {
+        Solution alike = after;
+        foreach (DocumentId id in after.GetChanges(before).GetProjectChanges().SelectMany(project => project.GetChangedDocuments()))
+        {
+            Document changed = after.GetDocument(id)!;
+            foreach (DocumentId other in changed.GetLinkedDocumentIds())
+                alike = alike.WithDocumentText(other, await changed.GetTextAsync(cancellation));
+        }
+
+        return alike;
     }
 
     private static async Task<Solution> RoundAsync(Project project, Func<Diagnostic, bool> wanted, CancellationToken cancellation)

@@ -1,6 +1,7 @@
 using System.Globalization;
 using System.Net;
 using System.Text;
+using FrameSafe.Tool.Charting;
 using FrameSafe.Tool.Surveying;
 
 namespace FrameSafe.Tool.Reports;
@@ -34,11 +35,11 @@ internal static class ChartDrawing
         svg.Append("<style>.chart text{font:14px system-ui,sans-serif;fill:currentColor}.chart .label{font-size:12px}.chart rect{fill:none;stroke:currentColor;stroke-width:1.5}.chart line,.chart path{stroke:currentColor;stroke-width:1.5;fill:none}.chart .crossing{stroke-dasharray:5 4}.chart .found{fill:#b3261e;font-weight:600}</style>\n");
         foreach (ChartMotion motion in chart.Motions)
         {
-            (int x1, int y1) = places[motion.Parent];
+            (int x1, int y1) = places[motion.In];
             (int x2, int y2) = places[motion.Frame];
             Line(svg, x1 + (Width / 2), y1 + Height, x2 + (Width / 2), y2);
             string label = motion.MaxSpeed > 0
-                ? string.Create(CultureInfo.InvariantCulture, $"β ≤ {motion.MaxSpeed:G4}, γ ≤ {1 / Math.Sqrt((1 - motion.MaxSpeed) * (1 + motion.MaxSpeed)):G4}")
+                ? string.Create(CultureInfo.InvariantCulture, $"β ≤ {motion.MaxSpeed:G4}, γ ≤ {motion.MaxLorentzFactor:G4}")
                 : "β not declared";
             Label(svg, ((x1 + x2 + Width) / 2) + 8, (y1 + Height + y2) / 2, label);
         }
@@ -49,7 +50,7 @@ internal static class ChartDrawing
             (int x2, int y2) = places[crossing.To];
             int bend = Math.Max(x1, x2) + Width + 34;
             svg.Append(CultureInfo.InvariantCulture, $"<path class=\"crossing\" d=\"M {x1 + Width} {y1 + (Height / 2)} C {bend} {y1 + (Height / 2)} {bend} {y2 + (Height / 2)} {x2 + Width} {y2 + (Height / 2)}\"/>\n");
-            Label(svg, bend - 2, ((y1 + y2 + Height) / 2) - 14, crossing.Members.ToString(CultureInfo.InvariantCulture) + (crossing.Members == 1 ? " crossing" : " crossings"));
+            Label(svg, bend - 2, ((y1 + y2 + Height) / 2) - 14, crossing.Count.ToString(CultureInfo.InvariantCulture) + (crossing.Count == 1 ? " crossing" : " crossings"));
         }
 
         foreach (ChartFrame frame in chart.Frames)
@@ -73,7 +74,7 @@ internal static class ChartDrawing
         for (int i = 0; i < chart.Frames.Count; i++)
         {
             foreach (ChartMotion motion in chart.Motions)
-                depths[motion.Frame] = Math.Min(chart.Frames.Count, Math.Max(depths[motion.Frame], depths[motion.Parent] + 1));
+                depths[motion.Frame] = Math.Min(chart.Frames.Count, Math.Max(depths[motion.Frame], depths[motion.In] + 1));
         }
 
         var places = new Dictionary<string, (int, int)>();
@@ -90,9 +91,9 @@ internal static class ChartDrawing
     private static string Describe(FrameChart chart, Dictionary<string, string> names)
         => string.Join(" ", chart.Motions.Select(motion => string.Create(
                 CultureInfo.InvariantCulture,
-                $"{names[motion.Frame]} moves in {names[motion.Parent]}{(motion.MaxSpeed > 0 ? $" at up to {motion.MaxSpeed:G4} c" : "")}."))
+                $"{names[motion.Frame]} moves in {names[motion.In]}{(motion.MaxSpeed > 0 ? $" at up to {motion.MaxSpeed:G4} c" : "")}."))
             .Concat(chart.Crossings.Select(crossing => string.Create(
-                CultureInfo.InvariantCulture, $"{crossing.Members} member(s) carry numbers from {names[crossing.From]} to {names[crossing.To]}."))));
+                CultureInfo.InvariantCulture, $"{crossing.Count} member(s) carry numbers from {names[crossing.From]} to {names[crossing.To]}."))));
 
     private static void Line(StringBuilder svg, int x1, int y1, int x2, int y2)
         => svg.Append(CultureInfo.InvariantCulture, $"<line x1=\"{x1}\" y1=\"{y1}\" x2=\"{x2}\" y2=\"{y2}\"/>\n");

@@ -11,17 +11,20 @@ internal static class HtmlReport
     // Beyond this a browser labours; the SARIF file holds all.
     private const int MostShown = 5000;
 
+    internal const string Extension = ".html";
+
     internal static string Of(Survey survey)
     {
+        int projects = survey.Coverage.Select(row => row.Project).Distinct().Count();
         var html = new StringBuilder();
         html.Append("<!DOCTYPE html>\n<html lang=\"en\">\n<head>\n<meta charset=\"utf-8\">\n<meta name=\"viewport\" content=\"width=device-width, initial-scale=1\">\n")
             .Append("<meta http-equiv=\"Content-Security-Policy\" content=\"default-src 'none'; style-src 'unsafe-inline'; script-src 'unsafe-inline'\">\n")
             .Append("<title>FrameSafe survey</title>\n<style>\n").Append(Style).Append("</style>\n</head>\n<body>\n")
             .Append("<a class=\"skip\" href=\"#findings\">Skip to the findings</a>\n<header><h1>FrameSafe survey</h1>\n")
-            .Append("<p>").Append(Text(Screen.Count(survey.Findings.Count))).Append(" in ").Append(survey.Coverage.Count).Append(survey.Coverage.Count == 1 ? " project, " : " projects, ")
+            .Append("<p>").Append(Text(Screen.Count(survey.Findings.Count))).Append(" in ").Append(projects).Append(projects == 1 ? " project, " : " projects, ")
             .Append(survey.Lines.ToString("N0", CultureInfo.InvariantCulture)).Append(" lines.</p>\n");
-        foreach ((string project, string error) in survey.CompileErrors)
-            html.Append("<p class=\"broken\">").Append(Text(project)).Append(" does not compile and was surveyed as far as it could be: ").Append(Text(error)).Append("</p>\n");
+        foreach (Trouble trouble in survey.Troubles)
+            html.Append("<p class=\"broken\">").Append(Text(trouble.ToString())).Append("</p>\n");
         html.Append("</header>\n<main>\n");
         Findings(html, survey);
         Coverage(html, survey);
@@ -63,14 +66,23 @@ internal static class HtmlReport
 
     private static void Coverage(StringBuilder html, Survey survey)
     {
-        html.Append("<section aria-labelledby=\"coverage\"><h2 id=\"coverage\">Coverage of tags</h2>\n<table><thead><tr><th scope=\"col\">Project</th><th scope=\"col\">Tagged</th><th scope=\"col\">Numbers</th><th scope=\"col\">Share</th></tr></thead><tbody>\n");
-        foreach (ProjectCoverage row in survey.Coverage)
+        html.Append("<section aria-labelledby=\"coverage\"><h2 id=\"coverage\">Coverage of tags</h2>\n<div class=\"scroll\" tabindex=\"0\" role=\"region\" aria-labelledby=\"coverage\">\n<table><thead><tr><th scope=\"col\">Project</th><th scope=\"col\">File</th><th scope=\"col\">Tagged</th><th scope=\"col\">Numbers</th><th scope=\"col\">Share</th><th scope=\"col\">Untagged</th></tr></thead><tbody>\n");
+        foreach (FileCoverage row in survey.Coverage)
         {
-            html.Append("<tr><th scope=\"row\">").Append(Text(row.Project)).Append("</th><td>").Append(row.Tagged).Append("</td><td>").Append(row.Numbers)
-                .Append(CultureInfo.InvariantCulture, $"</td><td><meter min=\"0\" max=\"1\" value=\"{row.Share:0.###}\"></meter> {row.Share * 100:0.#} %</td></tr>\n");
+            html.Append("<tr><th scope=\"row\">").Append(Text(row.Project)).Append("</th><td>").Append(Text(row.File)).Append("</td><td>").Append(row.Tagged).Append("</td><td>").Append(row.Numbers)
+                .Append(CultureInfo.InvariantCulture, $"</td><td><meter min=\"0\" max=\"1\" value=\"{row.Share:0.###}\"></meter> {row.Share * 100:0.#} %</td><td>");
+            if (row.Untagged.Count > 0)
+            {
+                html.Append("<details><summary>").Append(row.Untagged.Count).Append(" untagged</summary><ul>");
+                foreach (UntaggedNumber number in row.Untagged)
+                    html.Append(CultureInfo.InvariantCulture, $"<li>{Text(number.Name)} <span class=\"place\">line {number.Line}</span></li>");
+                html.Append("</ul></details>");
+            }
+
+            html.Append("</td></tr>\n");
         }
 
-        html.Append("</tbody></table></section>\n");
+        html.Append("</tbody></table></div></section>\n");
     }
 
     private static string Text(string text) => WebUtility.HtmlEncode(text);

@@ -39,17 +39,19 @@ internal sealed class Screen(IAnsiConsole console, bool quiet)
 
         if (survey.Findings.Count > 0)
             Console.Write(Summary(survey));
-        foreach ((string project, string error) in survey.CompileErrors)
-            Console.MarkupLineInterpolated($"[red]{project} does not compile[/] and was surveyed as far as it could be: {error}");
+        foreach (Trouble trouble in survey.Troubles)
+            Console.MarkupLineInterpolated($"[red]{trouble.ToString()}[/]");
         ShowCoverage(survey);
         Console.WriteLine(survey.Findings.Count == 0 ? "No findings." : Count(survey.Findings.Count) + ".");
     }
 
     internal static string Count(int findings) => findings == 1 ? "1 finding" : findings.ToString("N0", CultureInfo.InvariantCulture) + " findings";
 
+    internal static string Percent(double share) => (share * 100).ToString("0.#", CultureInfo.InvariantCulture) + " %";
+
     private static Table Summary(Survey survey)
     {
-        Dictionary<string, string> titles = Surveyor.Analyzers[0].SupportedDiagnostics.ToDictionary(rule => rule.Id, rule => rule.Title.ToString());
+        Dictionary<string, string> titles = Surveyor.Rules.ToDictionary(rule => rule.Id, rule => rule.Title.ToString());
         Table table = new Table().Border(TableBorder.Simple)
             .AddColumn("rule").AddColumn("what").AddColumn(new TableColumn("findings").RightAligned()).AddColumn(new TableColumn("worst error").RightAligned());
         foreach (IGrouping<string, Finding> rule in survey.Findings.GroupBy(finding => finding.Rule).OrderBy(group => group.Key, StringComparer.Ordinal))
@@ -67,16 +69,17 @@ internal sealed class Screen(IAnsiConsole console, bool quiet)
 
     private void ShowCoverage(Survey survey)
     {
-        int tagged = survey.Coverage.Sum(row => row.Tagged);
-        int numbers = survey.Coverage.Sum(row => row.Numbers);
-        if (survey.Coverage.Count > 1 && !quiet)
+        (string Project, int Tagged, int Numbers)[] projects =
+        [
+            .. survey.Coverage.GroupBy(row => row.Project).Select(group => (group.Key, group.Sum(row => row.Tagged), group.Sum(row => row.Numbers))),
+        ];
+        if (projects.Length > 1 && !quiet)
         {
-            foreach (ProjectCoverage row in survey.Coverage.Where(row => row.Numbers > 0))
-                Console.WriteLine($"  coverage of {row.Project}: {row.Tagged} of {row.Numbers} numbers tagged ({Percent(row.Share)})");
+            foreach ((string project, int tagged, int numbers) in projects)
+                Console.WriteLine($"  coverage of {project}: {tagged} of {numbers} numbers tagged ({Percent((double)tagged / numbers)})");
         }
 
-        Console.WriteLine($"Coverage: {tagged} of {numbers} numbers in signatures, fields and properties carry a tag ({Percent(numbers == 0 ? 1 : (double)tagged / numbers)}).");
+        double share = survey.Numbers == 0 ? 1 : (double)survey.Tagged / survey.Numbers;
+        Console.WriteLine($"Coverage: {survey.Tagged} of {survey.Numbers} numbers in signatures, fields and properties carry a tag ({Percent(share)}).");
     }
-
-    private static string Percent(double share) => (share * 100).ToString("0.#", CultureInfo.InvariantCulture) + " %";
 }

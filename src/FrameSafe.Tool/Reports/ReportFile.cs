@@ -1,23 +1,37 @@
 namespace FrameSafe.Tool.Reports;
 
 /// <summary>Writes files whole or not at all: beside their place first, then in it.</summary>
-internal static class FileReport
+internal static class ReportFile
 {
-    /// <exception cref="BadInputException">The path is a folder, or cannot be written to.</exception>
+    /// <summary>Writes a text as UTF-8 without a byte order mark.</summary>
     internal static void Write(string path, string text)
+        => Write(path, stream =>
+        {
+            using var writer = new StreamWriter(stream, leaveOpen: true);
+            writer.Write(text);
+        });
+
+    /// <exception cref="BadInputException">The path is a folder, or cannot be written to.</exception>
+    internal static void Write(string path, Action<Stream> write)
     {
         CheckWritable(path);
+        string full = Path.GetFullPath(path);
+        string beside = $"{full}.{Environment.ProcessId}.new";
         try
         {
-            string full = Path.GetFullPath(path);
             Directory.CreateDirectory(Path.GetDirectoryName(full)!);
-            string beside = full + ".new";
-            File.WriteAllText(beside, text);
+            using (FileStream stream = File.Create(beside))
+                write(stream);
             File.Move(beside, full, overwrite: true);
         }
         catch (Exception exception) when (exception is IOException or UnauthorizedAccessException)
         {
             throw new BadInputException($"{path}: cannot be written: {exception.Message}");
+        }
+        finally
+        {
+            if (File.Exists(beside))
+                File.Delete(beside);
         }
     }
 
