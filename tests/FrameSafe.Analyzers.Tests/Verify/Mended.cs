@@ -13,15 +13,6 @@ namespace FrameSafe.Analyzers.Tests.Verify;
 /// </summary>
 internal static class Mended
 {
-    private static readonly string[] ReferencePaths =
-    [
-        .. ((string)AppContext.GetData("TRUSTED_PLATFORM_ASSEMBLIES")!)
-            .Split(Path.PathSeparator)
-            .Where(path => Path.GetDirectoryName(path) == Path.GetDirectoryName(typeof(object).Assembly.Location)),
-        typeof(UnitAttribute).Assembly.Location,
-        Path.Combine(AppContext.BaseDirectory, "FrameSafe.dll"),
-    ];
-
     /// <summary>The members of a class, before with the places of findings marked <c>{|ID:…|}</c>, and after.</summary>
     internal static Task ByAsync<TRepair>(string before, string after, string? choice = null)
         where TRepair : Repair, new()
@@ -46,8 +37,7 @@ internal static class Mended
             // What a repair leaves is checked against the fixed text's own markup.
             MarkupOptions = MarkupOptions.UseFirstDescriptor,
         };
-        foreach (string path in ReferencePaths)
-            test.TestState.AdditionalReferences.Add(MetadataReference.CreateFromFile(path));
+        test.TestState.AdditionalReferences.AddRange(Source.References);
         await test.RunAsync();
     }
 

@@ -25,7 +25,8 @@ internal static class Source
 
         """;
 
-    private static readonly ImmutableArray<MetadataReference> References =
+    /// <summary>The runtime's assemblies and ours, read once for all tests.</summary>
+    internal static readonly ImmutableArray<MetadataReference> References =
     [
         .. ((string)AppContext.GetData("TRUSTED_PLATFORM_ASSEMBLIES")!)
             .Split(Path.PathSeparator)
